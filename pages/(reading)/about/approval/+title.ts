@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'How a guide is approved · Camber & Clay'

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'What “settled” means · Camber & Clay'

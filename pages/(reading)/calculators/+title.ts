@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Every calculator · Camber & Clay'

@@ -1,0 +1,22 @@
+export { byPart, partNames }
+
+import type { CalculatorPart } from '#shared/calculators/definition.ts'
+
+/** Parts of the car in the order of the book's chapters. */
+const partNames: Record<CalculatorPart, string> = {
+  tyres: 'Tyres and wheels',
+  driveline: 'Diffs and driveline',
+  'wheel angles': 'Wheel angles',
+  'springs and shocks': 'Springs and shocks',
+  'ride height and movement': 'How the car sits and moves',
+  weight: 'Weight',
+  'motor and gearing': 'Motor and gearing',
+  bench: 'The bench',
+}
+
+/** Calculators by the part of the car they are about; parts without one are left out. */
+function byPart<T extends { part: CalculatorPart }>(calculators: readonly T[]): { part: CalculatorPart; name: string; calculators: T[] }[] {
+  return (Object.keys(partNames) as CalculatorPart[])
+    .map((part) => ({ part, name: partNames[part], calculators: calculators.filter((calculator) => calculator.part === part) }))
+    .filter((group) => group.calculators.length > 0)
+}

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Set a new password · Camber & Clay'

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Glossary · Camber & Clay'

@@ -1,0 +1,3 @@
+import { startIslands } from '#renderer/islands/client.ts'
+
+startIslands()

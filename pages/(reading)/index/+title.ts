@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Camber & Clay: what to change on an off-road R/C car'

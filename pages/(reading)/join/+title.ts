@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Join the book · Camber & Clay'

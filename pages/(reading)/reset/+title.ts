@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Your new password · Camber & Clay'

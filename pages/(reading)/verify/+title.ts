@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Confirm your address · Camber & Clay'

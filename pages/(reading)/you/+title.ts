@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Your page · Camber & Clay'

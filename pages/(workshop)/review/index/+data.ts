@@ -1,0 +1,58 @@
+export { data }
+export type { Data, QueueRow }
+
+import type { PageContextServer } from 'vike/types'
+import type { ServiceContext } from '#server/context.ts'
+import { getEdit } from '#server/edits/get-edit.ts'
+import { listEdits } from '#server/edits/list-edits.ts'
+import type { EditEntry } from '#server/edits/views.ts'
+import { getEdition } from '#server/guides/get-edition.ts'
+import { listFreshInk } from '#server/guides/list-fresh-ink.ts'
+import { forPage } from '#server/http/page-abort.ts'
+import { compareGuides, type ChangeSizes } from '#shared/editing/compare-guides.ts'
+import { emptyGuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
+import type { EditState } from '#shared/vocabulary/edit-states.ts'
+import { plainContent } from '../../parts/plain-content.ts'
+
+type Data = Awaited<ReturnType<typeof data>>
+type QueueRow = Data['edits'][number]
+
+/** What `?state=` may ask for, by the words that stand on the page. */
+const shelves: Record<string, EditState> = { asked: 'changes_asked', approved: 'approved', declined: 'declined' }
+
+async function data(pageContext: PageContextServer) {
+  const { ctx, query, reader } = pageContext
+  const shelf = Object.hasOwn(shelves, query.state ?? '') ? query.state! : 'waiting'
+  const state = shelves[shelf] ?? 'in_review'
+  const page = Math.min(100_000, Math.max(1, Number.parseInt(query.page ?? '1', 10) || 1))
+  return forPage(pageContext, async () => {
+    const list = await listEdits(ctx, { whose: 'everyone', state, page })
+    const [last] = list.total === 0 ? await listFreshInk(ctx, { limit: 1 }) : []
+    return {
+      shelf,
+      now: ctx.clock().toISOString(),
+      edits: await Promise.all(list.edits.map((edit) => queueRow(ctx, edit, reader?.id))),
+      page: list.page,
+      pages: list.pages,
+      total: list.total,
+      lastApproved: last === undefined ? null : { slug: last.slug, mark: last.mark, title: last.title, publishedAt: last.publishedAt },
+    }
+  })
+}
+
+async function queueRow(ctx: ServiceContext, edit: EditEntry, readerId: string | undefined) {
+  const { id, title, guide, chapter, author, summary, sentAt, updatedAt, baseEdition, state } = edit
+  const sizes = state === 'in_review' ? await sizesOf(ctx, edit) : null
+  return { id, title, guide, chapter, author, summary, sentAt, updatedAt, baseEdition, state, sizes, isMine: author.id === readerId }
+}
+
+async function sizesOf(ctx: ServiceContext, { id, guide, baseEdition }: EditEntry): Promise<ChangeSizes> {
+  const [{ content }, base] = await Promise.all([getEdit(ctx, id), baseOf(ctx, guide?.slug, baseEdition)])
+  return compareGuides(base, content).counts
+}
+
+async function baseOf(ctx: ServiceContext, slug: string | undefined, number: number | null): Promise<GuideDraft> {
+  if (slug === undefined || number === null) return emptyGuideContent()
+  const edition = await getEdition(ctx, { slug, number })
+  return 'movedTo' in edition ? emptyGuideContent() : plainContent(edition)
+}

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Review desk · Camber & Clay'

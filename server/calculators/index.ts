@@ -1,0 +1,3 @@
+export { loadCalculators } from './load-registry.ts'
+export type { CalculatorRegistry } from './load-registry.ts'
+export { calculatorRoutes } from './routes.ts'

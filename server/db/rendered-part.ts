@@ -1,0 +1,1 @@
+export type { RenderedPart } from '../rendering/index.ts'

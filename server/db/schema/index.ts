@@ -1,0 +1,6 @@
+export { glossaryTerms, wantedGuides } from './book.ts'
+export { editNotes, edits, reviews } from './edits.ts'
+export { adjustables, effects } from './effects.ts'
+export { chapters, editions, guides, slugRedirects } from './guides.ts'
+export { members, sessions, signInTokens } from './people.ts'
+export { auditEntries, idempotencyKeys, outbox, rateLimits } from './records.ts'

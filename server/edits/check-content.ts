@@ -1,0 +1,54 @@
+export { checkContent, renderBody }
+export type { CheckedContent }
+
+import type { ServiceContext } from '../context.ts'
+import { adjustables } from '../db/schema/index.ts'
+import { AppError, ValidationError, isAppError, type FieldProblem } from '../errors.ts'
+import type { RenderResult } from '../rendering/index.ts'
+import { withoutEmptyRows } from '#shared/editing/whole-rows.ts'
+import { GuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
+import { missedExamples, runWorkedExamples } from './worked-examples.ts'
+
+interface CheckedContent {
+  content: GuideContent
+  rendering: RenderResult
+}
+
+/**
+ * Whether a draft could be published as it is: whole, with effects on things that exist, a body that renders without
+ * problems and worked examples that match. Renders the body, so it is called before a transaction, never inside one.
+ * @throws ValidationError (422) that names every field to mend
+ */
+async function checkContent(ctx: Pick<ServiceContext, 'db' | 'renderer' | 'calculators'>, draft: GuideDraft): Promise<CheckedContent> {
+  const parsed = GuideContent.safeParse(withoutEmptyRows(draft))
+  const problems: FieldProblem[] = (parsed.error?.issues ?? []).map((issue) => ({
+    field: ['content', ...issue.path].join('.'),
+    message: issue.message,
+  }))
+  const known = new Set((await ctx.db.select({ key: adjustables.key }).from(adjustables)).map((row) => row.key))
+  draft.effects.forEach((effect, n) => {
+    if (known.has(effect.adjustable)) return
+    problems.push({ field: `content.effects.${n}.adjustable`, message: 'What you change: choose one from the list.' })
+  })
+  const rendering = draft.body.trim() === '' ? null : await renderBody(ctx, draft.body)
+  if (rendering !== null) {
+    const said = rendering.problems.map((problem) => `Line ${problem.line}: ${problem.message}`)
+    const missed = missedExamples(runWorkedExamples(ctx, rendering.parts))
+    for (const message of [...said, ...missed]) problems.push({ field: 'content.body', message })
+  }
+  if (!parsed.success || rendering === null || problems.length > 0) {
+    throw new ValidationError(`${problems.length === 1 ? 'One thing has' : `${problems.length} things have`} to be mended first.`, problems)
+  }
+  return { content: parsed.data, rendering }
+}
+
+/** Renders a body; what the renderer refuses is said at the field where the body stands. */
+async function renderBody(ctx: Pick<ServiceContext, 'renderer'>, body: string): Promise<RenderResult> {
+  try {
+    return await ctx.renderer.render(body)
+  } catch (error) {
+    if (!isAppError(error)) throw error
+    const fields = error.fields.map(({ field, message }) => ({ field: field === 'body' ? 'content.body' : field, message }))
+    throw new AppError(error.code, error.status, error.message, { fields, details: error.details, cause: error })
+  }
+}

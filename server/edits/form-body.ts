@@ -1,0 +1,25 @@
+export { flatFields, formVersion, toFormProblems }
+
+import { AppError } from '../errors.ts'
+import type { FormFields } from '#shared/editing/form-fields.ts'
+
+/** A posted form as flat texts. Of a field that was posted twice the last counts. */
+function flatFields(body: unknown): FormFields {
+  return Object.fromEntries(
+    Object.entries((body ?? {}) as Record<string, unknown>).flatMap(([name, value]) => {
+      const text: unknown = Array.isArray(value) ? value.at(-1) : value
+      return typeof text === 'string' ? [[name, text]] : []
+    }),
+  )
+}
+
+/** The version a form was made for; one that nobody has where it is missing or no number, so that it counts as stale. */
+function formVersion(fields: FormFields): number {
+  return /^\d{1,9}$/.test(fields['version'] ?? '') ? Number(fields['version']) : -1
+}
+
+/** The same error with the names that the fields have in the form: `body` for `content.body`. */
+function toFormProblems(error: AppError): AppError {
+  const fields = error.fields.map(({ field, message }) => ({ field: field.replace(/^content\./, ''), message }))
+  return new AppError(error.code, error.status, error.message, { fields, details: error.details, cause: error })
+}

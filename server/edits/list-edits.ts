@@ -1,0 +1,41 @@
+export { listEdits }
+export type { EditList, EditListQuery }
+
+import { and, asc, count, desc, eq, ne, type SQL } from 'drizzle-orm'
+import type { ServiceContext } from '../context.ts'
+import { edits } from '../db/schema/index.ts'
+import { requirePermission, requireSignedIn } from '../people/permissions.ts'
+import type { EditState } from '#shared/vocabulary/edit-states.ts'
+import { entryOf, listEditRows } from './edit-row.ts'
+import type { EditEntry } from './views.ts'
+
+const EDITS_PER_PAGE = 50
+
+interface EditListQuery {
+  state?: EditState | undefined
+  /** `everyone` is for moderators, and never shows drafts. @default 'mine' */
+  whose?: 'mine' | 'everyone' | undefined
+  page?: number | undefined
+}
+
+interface EditList {
+  edits: EditEntry[]
+  page: number
+  pages: number
+  total: number
+}
+
+/** One's own edits, newest first; or everyone's for a moderator, those that wait longest first. */
+async function listEdits(ctx: ServiceContext, { state, whose = 'mine', page = 1 }: EditListQuery = {}): Promise<EditList> {
+  requireSignedIn(ctx.actor, 'see your edits')
+  if (whose === 'everyone') requirePermission(ctx.actor, 'queue.read')
+  const scope: SQL | undefined = whose === 'everyone' ? ne(edits.state, 'draft') : eq(edits.authorId, ctx.actor.id)
+  const where = and(scope, state === undefined ? undefined : eq(edits.state, state))
+  const order = whose === 'everyone' && state === 'in_review' ? [asc(edits.sentAt)] : [desc(edits.updatedAt)]
+  const [rows, [totals]] = await Promise.all([
+    listEditRows(ctx, { where, order: [...order, asc(edits.id)], limit: EDITS_PER_PAGE, offset: (page - 1) * EDITS_PER_PAGE }),
+    ctx.db.select({ total: count() }).from(edits).where(where),
+  ])
+  const total = totals?.total ?? 0
+  return { edits: rows.map(entryOf), page, pages: Math.max(1, Math.ceil(total / EDITS_PER_PAGE)), total }
+}

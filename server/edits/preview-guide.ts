@@ -1,0 +1,39 @@
+export { previewGuide, previewOf }
+
+import type { z } from 'zod'
+import type { ServiceContext } from '../context.ts'
+import { effectRow, findAdjustables } from '../effects/index.ts'
+import { parseInput } from '../people/parse-input.ts'
+import { requirePermission } from '../people/permissions.ts'
+import type { GuideDraft } from '#shared/schemas/guide-content.ts'
+import { renderBody } from './check-content.ts'
+import { PreviewInput } from './inputs.ts'
+import type { Preview } from './views.ts'
+import { runWorkedExamples } from './worked-examples.ts'
+
+/**
+ * A draft exactly as publishing would store it: the same renderer, the same words for effects.
+ * @throws ValidationError or the renderer's refusal (422), at the field
+ */
+async function previewGuide(ctx: ServiceContext, input: z.input<typeof PreviewInput>): Promise<Preview> {
+  requirePermission(ctx.actor, 'preview.render')
+  await ctx.rateLimits.take('preview', ctx.actor.id)
+  const { content } = parseInput(PreviewInput, input)
+  return previewOf(ctx, content)
+}
+
+async function previewOf(ctx: ServiceContext, content: GuideDraft): Promise<Preview> {
+  const { html, parts, headings, problems } = await renderBody(ctx, content.body)
+  const named = parts.flatMap((part) => (part.kind === 'effects' ? [part.adjustable] : []))
+  const adjustables = await findAdjustables(ctx, [...content.effects.map((effect) => effect.adjustable), ...named])
+  const byKey = new Map(adjustables.map((adjustable) => [adjustable.key, adjustable]))
+  return {
+    html,
+    parts,
+    headings,
+    effects: content.effects.map((effect) => effectRow(effect, byKey.get(effect.adjustable))),
+    problems,
+    workedExamples: runWorkedExamples(ctx, parts),
+    adjustables,
+  }
+}

@@ -1,0 +1,5 @@
+export { startMailCapture } from './capture.ts'
+export { createMailWorker } from './deliver.ts'
+export type { MailWorker } from './deliver.ts'
+export type { CapturedMail, Mailbox } from './mailbox.ts'
+export { queueMail } from './outbox.ts'

@@ -1,0 +1,5 @@
+export { peopleApi } from './api.ts'
+export { describeDemoSignIns, ensureDemoSignIns } from './demo-sign-ins.ts'
+export { peopleForms } from './forms.ts'
+export { mailboxApi } from './mailbox-api.ts'
+export { sessionMiddleware } from './session.ts'

@@ -1,0 +1,82 @@
+export type {
+  BodySegment, CalculatorPart, CalculatorVocabulary, EffectsPart, Heading, RenderedPart, RenderProblem, RenderResult,
+  RenderVocabulary, WorkedPart,
+}
+
+/** What the renderer has to know of one calculator to check the numbers a guide gives it. */
+interface CalculatorVocabulary {
+  slug: string
+  title: string
+  inputs: { key: string; min: number; max: number; unit: string }[]
+  outputs: { key: string; unit: string }[]
+}
+
+/**
+ * Everything outside the text that a body may refer to, as plain data because it crosses into a worker
+ * thread.
+ */
+interface RenderVocabulary {
+  calculators: CalculatorVocabulary[]
+  /** Glossary entries by key; `short` is one sentence. */
+  glossary: Record<string, { term: string; short: string }>
+  /** Keys of the adjustables, such as `front_diff_fluid`. */
+  adjustables: string[]
+}
+
+/** Something the writer should mend. The text is still rendered. `line` counts from 1 in the Markdown. */
+interface RenderProblem {
+  line: number
+  code: string
+  message: string
+}
+
+/** A heading of the body outside lists and quotes; `id` is the fragment to link to. */
+interface Heading {
+  level: number
+  id: string
+  text: string
+}
+
+/** A calculator with the writer's starting values, in the unit of each input. */
+interface CalculatorPart {
+  n: number
+  kind: 'calculator'
+  slug: string
+  preset: Record<string, number>
+}
+
+/** The lap line of one adjustable. */
+interface EffectsPart {
+  n: number
+  kind: 'effects'
+  adjustable: string
+}
+
+/**
+ * A worked example: the run, the answer the writer expects, and how far off it may be as a fraction (0.01 =
+ * 1 %).
+ */
+interface WorkedPart {
+  n: number
+  kind: 'worked'
+  slug: string
+  inputs: Record<string, number>
+  expect: { key: string; value: number }
+  tolerance: number
+}
+
+type RenderedPart = CalculatorPart | EffectsPart | WorkedPart
+
+/** A body in reading order: stretches of complete HTML with the parts between them. */
+type BodySegment = { kind: 'html'; html: string } | RenderedPart
+
+interface RenderResult {
+  /** Sanitised HTML with one empty placeholder for each part (see split-parts.ts). */
+  html: string
+  parts: RenderedPart[]
+  headings: Heading[]
+  problems: RenderProblem[]
+  /** The words alone, one line a block, for descriptions and search. */
+  plainText: string
+  rendererVersion: number
+}

@@ -1,0 +1,78 @@
+export { seedDatabase }
+
+import { sql } from 'drizzle-orm'
+import { loadCalculators } from '../calculators/index.ts'
+import { connectDatabase, type Database } from '../db/client.ts'
+import { adjustables, chapters, glossaryTerms, guides, members, wantedGuides } from '../db/schema/index.ts'
+import { loadRenderVocabulary } from '../guides/render-vocabulary.ts'
+import { seedGuide } from '../guides/index.ts'
+import { createGuideRenderer } from '../rendering/index.ts'
+import { readContent, type BookContent, type GuideFile } from './read-content.ts'
+import { seedDeskEdit } from './desk-edit.ts'
+
+/**
+ * Fills the database with the book in `content/`. Idempotent: what is already there is left as it is, so that words
+ * which members have improved since are never put back.
+ * @param options.demo also puts one edit on the review desk, so that a demonstration has something to decide
+ * @returns how many guides were new
+ */
+async function seedDatabase(url: string, options: { demo: boolean }): Promise<{ guides: number }> {
+  const content = await readContent()
+  const connection = connectDatabase(url, { max: 2, statementTimeout: 60_000 })
+  const calculators = await loadCalculators()
+  const renderer = createGuideRenderer({
+    vocabulary: () => loadRenderVocabulary(connection.db, calculators),
+    // A slow machine that is still installing things must not fail its first start over a time-out.
+    timeoutMs: 30_000,
+  })
+  try {
+    await seedShelves(connection.db, content)
+    const authors = await seedMembers(connection.db, content)
+    let created = 0
+    for (const guide of await newGuides(connection.db, content.guides)) {
+      const { author, approver, ...rest } = guide
+      const outcome = await seedGuide({ db: connection.db, renderer }, {
+        ...rest,
+        authorId: idOf(authors, author, guide.slug),
+        approverId: idOf(authors, approver, guide.slug),
+      })
+      if (outcome.created) created += 1
+    }
+    if (options.demo && created > 0) await seedDeskEdit(connection.db, authors)
+    return { guides: created }
+  } finally {
+    await renderer.close()
+    await connection.close()
+  }
+}
+
+async function newGuides(db: Database, files: GuideFile[]): Promise<GuideFile[]> {
+  const known = new Set((await db.select({ slug: guides.slug }).from(guides)).map(({ slug }) => slug))
+  return files.filter(({ slug }) => !known.has(slug))
+}
+
+function idOf(ids: Map<string, string>, key: string, slug: string): string {
+  const id = ids.get(key)
+  if (id === undefined) throw new Error(`content/guides/${slug}.md: “${key}” is nobody in content/members.yaml`)
+  return id
+}
+
+async function seedShelves(db: Database, content: BookContent): Promise<void> {
+  await db.insert(chapters).values(content.chapters).onConflictDoNothing()
+  await db
+    .insert(adjustables)
+    .values(
+      content.adjustables.map(({ up, down, guide, ...rest }) => ({ ...rest, upName: up, downName: down, guideSlug: guide })),
+    )
+    .onConflictDoNothing()
+  await db.insert(glossaryTerms).values(content.glossary).onConflictDoNothing()
+  await db.insert(wantedGuides).values(content.wanted).onConflictDoNothing()
+}
+
+/** The writers of the book, named but without a way to sign in. */
+async function seedMembers(db: Database, content: BookContent): Promise<Map<string, string>> {
+  const rows = content.members.map(({ key, name, role, about }) => ({ key, name, role, about }))
+  await db.insert(members).values(rows).onConflictDoNothing()
+  const all = await db.select({ id: members.id, key: members.key }).from(members).where(sql`${members.key} is not null`)
+  return new Map(all.map(({ id, key }) => [key!, id]))
+}

@@ -1,0 +1,111 @@
+import { afterAll, beforeAll, expect, it } from 'vitest'
+import { openBrowser, type Visit } from '../support/browser.ts'
+import { createTestApp, DEMO_PASSWORDS, type TestApp } from '../support/test-app.ts'
+import { xssPayloads } from '../security/xss-payloads.ts'
+
+/**
+ * Members' words that try to run script, saved, sent, approved and then read in a real browser. The payloads are of our own making and call
+ * `alert`; any dialog, script error or request to another host fails the test.
+ */
+let chromium: Awaited<ReturnType<typeof openBrowser>>
+let app: TestApp
+beforeAll(async () => {
+  ;[chromium, app] = await Promise.all([openBrowser(), createTestApp()])
+})
+afterAll(() => Promise.all([chromium.close(), app.stop()]))
+
+const PER_GUIDE = 45
+const groups = Array.from({ length: Math.ceil(xssPayloads.length / PER_GUIDE) }, (_, n) =>
+  xssPayloads.slice(n * PER_GUIDE, (n + 1) * PER_GUIDE),
+)
+
+it('the same payloads do fire when a page prints them raw, so silence means something', async () => {
+  const { page, close } = await chromium.visit('about:blank')
+  let fired = 0
+  page.on('dialog', (dialog) => {
+    fired += 1
+    void dialog.dismiss()
+  })
+  for (const payload of xssPayloads.filter((text) => text.startsWith('<')).slice(0, 40)) {
+    await page.setContent(`<!doctype html><body>${payload}</body>`, { waitUntil: 'commit' })
+  }
+  expect(fired).toBeGreaterThan(5)
+  await close()
+})
+
+it('runs none of them for a reader, a writer or a moderator', async () => {
+  const fired: string[] = []
+  const writer = await app.signedIn('priya')
+  const moderator = await app.signedIn('odile')
+  const reading = await watched(await chromium.visit(app.url), fired)
+  const judging = await watched(await chromium.visit(app.url), fired)
+  await judging.context.request.post('/api/session', { data: DEMO_PASSWORDS.odile! })
+  const writing = await watched(await chromium.visit(app.url), fired)
+  await writing.context.request.post('/api/session', { data: DEMO_PASSWORDS.priya! })
+
+  const base = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
+  let edit = base
+  for (const [n, payloads] of groups.entries()) {
+    if (n > 0) edit = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
+    const hostile = oneLine(payloads[n % payloads.length]!)
+    const content = {
+      ...edit.content,
+      title: `Toe ${hostile}`.slice(0, 90),
+      inShort: `What toe does, and then ${hostile}`.slice(0, 280),
+      body: payloads.map((payload, at) => `## Part ${at}\n\n${payload}\n`).join('\n'),
+      sources: [{ kind: 'common_practice', text: `Said at the pits ${hostile}`.slice(0, 400), url: '' }],
+    }
+    const saved = await writer
+      .put(`/api/edits/${edit.id}`)
+      .set('If-Match', `"${edit.version}"`)
+      .send({ content, summary: `Payloads ${n} ${hostile}`.slice(0, 140) })
+      .expect(200)
+    await writing.page.goto(`/write/${edit.id}`, { waitUntil: 'networkidle' })
+    const sent = await writer.post(`/api/edits/${edit.id}/send`).set('If-Match', `"${(saved.body as EditBody).version}"`).send({})
+    expect(sent.status, JSON.stringify(sent.body)).toBe(200)
+    await judging.page.goto(`/review/${edit.id}`, { waitUntil: 'networkidle' })
+    await moderator.post(`/api/edits/${edit.id}/approve`).set('If-Match', `"${(sent.body as EditBody).version}"`).send({}).expect(200)
+    for (const path of ['/guides/rear-toe', '/', '/chapters/C', '/guides/rear-toe/history', `/guides/rear-toe/compare?from=${n + 1}&to=${n + 2}`]) {
+      await reading.page.goto(path, { waitUntil: 'networkidle' })
+    }
+    await pokeEverything(reading)
+    expect(fired).toEqual([])
+  }
+  for (const visit of [reading, judging, writing]) await visit.close()
+})
+
+interface EditBody {
+  id: string
+  version: number
+  content: Record<string, unknown>
+}
+
+function oneLine(text: string): string {
+  return text.replace(/[\u0000-\u001f\u007f-\u009f\u2028\u2029]/g, ' ')
+}
+
+async function watched(visit: Visit, fired: string[]): Promise<Visit> {
+  visit.page.on('dialog', (dialog) => {
+    fired.push(`dialog: ${dialog.message()}`)
+    void dialog.dismiss()
+  })
+  visit.page.on('request', (request) => {
+    if (!request.url().startsWith(app.url)) fired.push(`request: ${request.url()}`)
+  })
+  visit.page.on('pageerror', (error) => fired.push(`script error: ${error.message}`))
+  return visit
+}
+
+/** Touches what a payload may have left behind: everything that takes focus, and every link in the text. */
+async function pokeEverything({ page }: Visit): Promise<void> {
+  await page.goto('/guides/rear-toe')
+  await page.evaluate(() => {
+    for (const element of document.querySelectorAll<HTMLElement>('main *')) {
+      for (const type of ['mouseover', 'focus', 'click']) {
+        if (type === 'click' && element instanceof HTMLAnchorElement && /^https?:/.test(element.href)) continue
+        if (type === 'click' && element.closest('form, a[href]') !== null && !/^javascript/i.test(element.getAttribute('href') ?? '')) continue
+        element.dispatchEvent(new MouseEvent(type, { bubbles: true }))
+      }
+    }
+  })
+}

@@ -1,0 +1,196 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import type supertest from 'supertest'
+import { randomUUID } from 'node:crypto'
+import { listRoutes } from '../support/list-routes.ts'
+import { createTestApp, type TestApp } from '../support/test-app.ts'
+
+/**
+ * Every route against every role. Each request is otherwise fit to be carried out or fails only for what it carries, so a refusal
+ * can come from nothing but the role: 401 not signed in, 403 not allowed, 404 hidden, `in` anything else. Posted forms send a visitor to
+ * sign in instead (303).
+ */
+const ROLES = ['visitor', 'unverified', 'member', 'moderator', 'admin'] as const
+type Role = (typeof ROLES)[number]
+type Outcome = 'in' | 'sign-in' | 401 | 403 | 404
+
+const all = (outcome: Outcome): Outcome[] => ROLES.map(() => outcome)
+const members: Outcome[] = [401, 'in', 'in', 'in', 'in']
+const verified: Outcome[] = [401, 403, 'in', 'in', 'in']
+const admins: Outcome[] = [401, 403, 403, 403, 'in']
+/** Someone else's edit in review: hidden from members, readable for moderators, changed by nobody but its writer. */
+const writerOnly: Outcome[] = [401, 404, 404, 403, 403]
+const deskOnly: Outcome[] = [401, 404, 404, 'in', 'in']
+const form = (outcomes: Outcome[]): Outcome[] => outcomes.map((outcome) => (outcome === 401 ? 'sign-in' : outcome))
+
+const matrix: Record<string, Outcome[]> = {
+  'GET /healthz': all('in'),
+  'GET /readyz': all('in'),
+  'GET /api/health': all('in'),
+  'GET /robots.txt': all('in'),
+  'GET /sitemap.xml': all('in'),
+  'GET /{*path}': all('in'),
+  'POST /sheet': all('in'),
+  'GET /api/calculators': all('in'),
+  'POST /api/calculators/:slug/run': all('in'),
+  'GET /api/guides': all('in'),
+  'GET /api/guides/:slug': all('in'),
+  'GET /api/chapters': all('in'),
+  'GET /api/glossary': all('in'),
+  'GET /api/adjustables': all('in'),
+  'GET /api/mailbox': all('in'),
+  'GET /api/mailbox/:id': all(404),
+  'POST /api/preview': verified,
+  'GET /api/edits': members,
+  'POST /api/edits': verified,
+  'GET /api/edits/:id': deskOnly,
+  'PUT /api/edits/:id': writerOnly,
+  'POST /api/edits/:id/send': writerOnly,
+  'POST /api/edits/:id/withdraw': writerOnly,
+  'POST /api/edits/:id/merge': writerOnly,
+  'POST /api/edits/:id/rebase': deskOnly,
+  'POST /api/edits/:id/ask': deskOnly,
+  'POST /api/edits/:id/decline': deskOnly,
+  'POST /api/edits/:id/approve': deskOnly,
+  'POST /api/edits/:id/notes': deskOnly,
+  'POST /api/members': all('in'),
+  'GET /api/members': admins,
+  'PUT /api/members/:id/role': admins,
+  'PUT /api/members/:id/status': admins,
+  'DELETE /api/members/:id/sessions': admins,
+  'POST /api/verifications': all('in'),
+  'POST /api/verification-mails': all('in'),
+  'POST /api/password-resets': all('in'),
+  'POST /api/password-resets/redeem': all('in'),
+  'PUT /api/password': members,
+  'GET /api/session': all('in'),
+  'POST /api/session': all('in'),
+  'DELETE /api/session': all('in'),
+  'GET /api/sessions': members,
+  'DELETE /api/sessions': members,
+  'DELETE /api/sessions/:handle': members,
+  'POST /join': all('in'),
+  'POST /sign-in': all('in'),
+  'POST /sign-out': all('in'),
+  'POST /forgotten': all('in'),
+  'POST /reset': all('in'),
+  'POST /verify': all('in'),
+  'POST /you/password': form(members),
+  'POST /you/sign-out-everywhere': form(members),
+  'POST /you/sessions/:handle/end': form(members),
+  'POST /you/resend': form(members),
+  'POST /members/:id/role': form(admins),
+  'POST /members/:id/status': form(admins),
+  'POST /members/:id/end-sessions': form(admins),
+  'POST /write': form(verified),
+  'POST /write/:id': form(writerOnly),
+  'POST /write/:id/withdraw': form(writerOnly),
+  'POST /write/:id/rebase': form(deskOnly),
+  'POST /review/:id/approve': form(deskOnly),
+  'POST /review/:id/ask': form(deskOnly),
+  'POST /review/:id/decline': form(deskOnly),
+  'POST /review/:id/note': form(deskOnly),
+  'POST /review/:id/rebase': form(deskOnly),
+}
+
+/** What has to be sent for the role to be the only thing that can be wrong. */
+const bodies: Record<string, object> = {
+  'POST /api/edits': { guideSlug: 'no-such-guide' },
+  'POST /api/edits/:id/notes': { text: '' },
+  'POST /write': { guideSlug: 'no-such-guide' },
+  'POST /review/:id/note': { text: '' },
+}
+
+let app: TestApp
+let editId: string
+let agents: Record<Role, ReturnType<typeof supertest.agent>>
+
+beforeAll(async () => {
+  app = await createTestApp()
+  const writer = await app.signedIn('tomasz')
+  const draft = await writer.post('/api/edits').send({ guideSlug: 'sway-bars' }).expect(201)
+  editId = (draft.body as { id: string }).id
+  await writer
+    .post(`/api/edits/${editId}/send`)
+    .set('If-Match', `"${(draft.body as { version: number }).version}"`)
+    .send({ summary: 'Says the same in the same words' })
+    .expect(200)
+  agents = {
+    visitor: app.agent(),
+    unverified: await unverifiedMember(),
+    member: await app.signedIn('priya'),
+    moderator: await app.signedIn('odile'),
+    admin: await app.signedIn('wanda'),
+  }
+})
+afterAll(() => app.stop())
+
+async function unverifiedMember(): Promise<ReturnType<typeof supertest.agent>> {
+  const who = { name: 'Newly Joined', email: 'newly@saltmarsh.example', password: 'seven wet laps before noon' }
+  const agent = app.agent()
+  await agent.post('/api/members').send(who).expect(201)
+  await agent.post('/api/session').send({ email: who.email, password: who.password }).expect(200)
+  return agent
+}
+
+it('names every route there is, so that a new one cannot go without rights', () => {
+  expect(Object.keys(matrix).sort()).toEqual([...new Set(listRoutes(app.express))].sort())
+})
+
+// What ends sessions comes last, since it ends those of the other rows too.
+const rows = Object.entries(matrix).sort(([one], [other]) => Number(endsSessions(one)) - Number(endsSessions(other)))
+
+describe.each(rows)('%s', (route, outcomes) => {
+  it.each(ROLES.map((role, n) => [role, outcomes[n]!] as const))('%s: %s', async (role, expected) => {
+    const [method, path] = route.split(' ') as [string, string]
+    const agent = endsSessions(route) && role !== 'visitor' ? await freshClient(role) : agents[role]
+    const status = await request(agent, method, path, bodies[route] ?? {})
+    const outcome = status.location?.startsWith('/sign-in?next=') ? 'sign-in' : [401, 403, 404].includes(status.code) ? status.code : 'in'
+    expect(isSameOutcome(route, outcome as Outcome, expected), `answered ${status.code}`).toBe(true)
+    expect(status.code).toBeLessThan(500)
+  })
+})
+
+/** Where nothing stands under the made-up id, a 404 tells that the role was let in. */
+function isSameOutcome(route: string, outcome: Outcome, expected: Outcome): boolean {
+  if (outcome === expected) return true
+  const nothingThere = /:handle|\/members\/:id|POST \/api\/edits$|POST \/write$|\{\*path\}/.test(route)
+  const wrongPassword = ['POST /api/session', 'POST /sign-in', 'PUT /api/password', 'POST /you/password'].includes(route)
+  return expected === 'in' && ((nothingThere && outcome === 404) || (wrongPassword && (outcome === 401 || outcome === 403)))
+}
+
+function endsSessions(route: string): boolean {
+  return ['DELETE /api/session', 'DELETE /api/sessions', 'POST /sign-out', 'POST /you/sign-out-everywhere', 'POST /api/session', 'POST /sign-in'].includes(route)
+}
+
+async function freshClient(role: Exclude<Role, 'visitor'>): Promise<ReturnType<typeof supertest.agent>> {
+  if (role !== 'unverified') return app.signedIn({ member: 'priya', moderator: 'odile', admin: 'wanda' }[role])
+  const agent = app.agent()
+  await agent.post('/api/session').send({ email: 'newly@saltmarsh.example', password: 'seven wet laps before noon' }).expect(200)
+  return agent
+}
+
+async function request(
+  agent: ReturnType<typeof supertest.agent>,
+  method: string,
+  path: string,
+  body: object,
+): Promise<{ code: number; location: string | undefined }> {
+  const url = path
+    .replace('/members/:id', `/members/${randomUUID()}`)
+    .replace('/mailbox/:id', '/mailbox/none')
+    .replace(':id', editId)
+    .replace('guides/:slug', 'guides/droop')
+    .replace(':slug', 'fluid-blend')
+    .replace(':handle', 'none')
+    .replace('{*path}', 'chapters')
+  const call = agent[method.toLowerCase() as 'get' | 'post' | 'put' | 'delete'](url).redirects(0)
+  // A version that no edit has: whoever is let in is told so (412, 428) and changes nothing.
+  if (url.startsWith('/api/edits/') && method !== 'GET') void call.set('If-Match', '"999999"')
+  if (method !== 'GET') {
+    if (url.startsWith('/api/')) void call.send(body)
+    else void call.type('form').send({ version: '999999', reason: 'A reason', ...body })
+  }
+  const answer = await call
+  return { code: answer.status, location: answer.headers.location as string | undefined }
+}
+
