@@ -60,7 +60,9 @@ export default tseslint.config(
   mayNotImport('shared', ['server', 'renderer', 'pages'], 'shared/ is pure: it imports nothing of ours, no I/O, no Vue, no Node.'),
   mayNotImport('renderer', ['server', 'pages'], 'renderer/ runs in the browser: it may import shared/ only.'),
   {
-    files: ['pages/**/*.vue', 'pages/**/+client.ts'],
+    files: ['pages/**/*.{vue,ts}'],
+    // What Vike runs on the server alone.
+    ignores: ['**/+data.ts', '**/+guard.server.ts', '**/+title.ts', '**/+description.ts', '**/+headersResponse.ts', '**/+on*.ts', '**/+htmlAttributes.ts', '**/*.test.ts'],
     rules: {
       '@typescript-eslint/no-restricted-imports': [
         'error',

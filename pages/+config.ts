@@ -10,5 +10,5 @@ export default {
   viewport: 'responsive',
   title: 'Camber & Clay',
   favicon: '/favicon.svg',
-  passToClient: ['reader', 'form', 'club', 'requestId', 'sheet', 'query'],
+  passToClient: ['reader', 'form', 'club', 'requestId', 'sheet', 'query', 'urlPathname'],
 } satisfies Config

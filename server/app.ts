@@ -26,8 +26,10 @@ import { securityHeaders } from './http/security-headers.ts'
 import { serveCachedPages } from './http/serve-cached.ts'
 import { sheetChoice } from './http/sheet-choice.ts'
 import { staticFiles } from './http/static-files.ts'
+import { createTidyUp } from './maintenance/tidy.ts'
 import { createMailWorker, startMailCapture, type MailWorker } from './mail/index.ts'
 import { mailboxApi, peopleApi, peopleForms, sessionMiddleware } from './people/index.ts'
+import { createPasswords } from './people/passwords.ts'
 import { createGuideRenderer } from './rendering/index.ts'
 import { loadRenderVocabulary } from './guides/render-vocabulary.ts'
 import { readVersion } from './version.ts'
@@ -62,10 +64,12 @@ async function createApp(config: Config, options: { clock?: () => Date } = {}): 
     }),
     pageCache: createPageCache(config.pageCacheBytes),
     rateLimits: createRateLimits(connection.pool),
+    passwords: createPasswords(),
     mailbox,
   }
   const listener = listenForPublishing(app)
   const mailWorker = createMailWorker(app)
+  const tidyUp = createTidyUp(app)
   await listener.ready
   const server = express()
   server.disable('x-powered-by')
@@ -91,7 +95,7 @@ async function createApp(config: Config, options: { clock?: () => Date } = {}): 
     express: server,
     mailWorker,
     async close() {
-      await Promise.all([listener.close(), mailWorker.close(), app.renderer.close()])
+      await Promise.all([listener.close(), mailWorker.close(), tidyUp.close(), app.renderer.close()])
       await mailbox?.close()
       await connection.close()
     },

@@ -8,6 +8,7 @@ import type { Database, DatabaseConnection, Transaction } from './db/client.ts'
 import type { PageCache } from './http/page-cache.ts'
 import type { RateLimits } from './http/rate-limits.ts'
 import type { Mailbox } from './mail/mailbox.ts'
+import type { Passwords } from './people/passwords.ts'
 import type { GuideRenderer } from './rendering/index.ts'
 import type { MemberRole } from '#shared/vocabulary/roles.ts'
 
@@ -22,6 +23,8 @@ interface App {
   renderer: GuideRenderer
   pageCache: PageCache
   rateLimits: RateLimits
+  /** Makes and compares the hashes of passwords, a few at a time. */
+  passwords: Passwords
   /** Captured mail; undefined when mail goes to a real server. */
   mailbox: Mailbox | undefined
 }

@@ -41,9 +41,9 @@ function placesFor(reader: PageReader | null, path: string): Place[] {
   return shown
 }
 
-// A guide belongs to the chapters: that is where a reader came from.
+// A guide belongs to the chapters and a part of the lap to the lap: that is where a reader came from.
 function standsIn(place: string, path: string): boolean {
-  if (place === '/') return path === '/'
+  if (place === '/') return path === '/' || path.startsWith('/lap/')
   if (place === '/chapters' && path.startsWith('/guides/')) return true
   return path === place || path.startsWith(`${place}/`)
 }

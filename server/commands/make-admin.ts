@@ -13,7 +13,7 @@ async function main(): Promise<void> {
   const config = readConfig(process.env)
   const connection = connectDatabase(config.databaseUrl, { max: 1 })
   try {
-    const link = await makeAdmin({ config, connection, db: connection.db, clock: () => new Date() }, { name, email })
+    const link = await makeAdmin({ config, db: connection.db, clock: () => new Date() }, { name, email })
     process.stdout.write(`${email} is an admin now. To set a password, within ${TOKEN_MINUTES.reset} minutes and once:\n${link}\n`)
   } finally {
     await connection.close()

@@ -7,7 +7,7 @@ import type { Transaction } from '../db/client.ts'
 import { constraintBroken } from '../db/pg-errors.ts'
 import { guides, reviews } from '../db/schema/index.ts'
 import { ConflictError } from '../errors.ts'
-import { createGuide, publishEdition } from '../guides/index.ts'
+import { createGuide, publishEdition, removeWish } from '../guides/index.ts'
 import { queueMail } from '../mail/outbox.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { requirePermission } from '../people/permissions.ts'
@@ -40,6 +40,7 @@ async function approveEdit(ctx: ServiceContext, { id, ...input }: { id: string }
   const edit = await loadEdit(ctx, id, 'edit.decide')
   const { actor } = ctx
   requirePermission(actor, 'edit.decide', edit)
+  await ctx.rateLimits.take('write', actor.id)
   const { version, note } = parseInput(DecisionInput, input)
   requireState(edit, 'approve')
   requireVersion(edit, version)
@@ -47,6 +48,8 @@ async function approveEdit(ctx: ServiceContext, { id, ...input }: { id: string }
   const checked = await checkContent(ctx, edit.content)
   try {
     const outcome = await ctx.db.transaction((tx) => publish(ctx, tx, { edit, actor, checked, note }))
+    // The other nodes hear of it; this one's next answer must have it already.
+    ctx.pageCache.clear()
     return { edit: await editView(ctx, id), ...outcome }
   } catch (error) {
     if (error instanceof BaseMovedMeanwhile) {
@@ -96,6 +99,7 @@ async function publish(ctx: ServiceContext, tx: Transaction, { edit, actor, chec
     summary: edit.summary,
     publishedAt: ctx.clock(),
   })
+  if (edit.guideId === null) await removeWish(tx, { wantedId: edit.wantedId, title: checked.content.title })
   await tx.insert(reviews).values({
     editId: edit.id, editVersion: edit.version, reviewerId: actor.id, decision: 'approve', reason: note, decidedAt: ctx.clock(),
   })

@@ -1,12 +1,11 @@
 export { baseMovedError, mergeWithPublished }
 
-import { eq } from 'drizzle-orm'
 import type { ServiceContext } from '../context.ts'
-import { editions } from '../db/schema/index.ts'
 import { ConflictError, type AppError } from '../errors.ts'
 import { mergeGuides } from '#shared/editing/merge-guides.ts'
 import { GuideDraft } from '#shared/schemas/guide-content.ts'
 import type { EditRow } from './edit-row.ts'
+import { contentOf } from './edition-content.ts'
 import type { BaseMoved } from './views.ts'
 
 /** Joins an edit with the edition that was published since it began; null when none was. */
@@ -21,11 +20,6 @@ async function mergeWithPublished(ctx: Pick<ServiceContext, 'db'>, edit: EditRow
     field: issue.path.join('.'), label: issue.message, base: '', mine: '', theirs: '',
   }))
   return { edition: publishedEdition, mergeable: conflicts.length + tooLong.length === 0, merged, conflicts: [...conflicts, ...tooLong] }
-}
-
-async function contentOf(ctx: Pick<ServiceContext, 'db'>, editionId: string): Promise<GuideDraft> {
-  const [row] = await ctx.db.select({ content: editions.content }).from(editions).where(eq(editions.id, editionId))
-  return row!.content
 }
 
 /** 409 `base_moved_mergeable` where the two fit together and only have to be looked at, `base_moved` where a person has to choose. */

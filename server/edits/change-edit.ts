@@ -1,4 +1,4 @@
-export { changeEdit, requireState, requireVersion, staleEdit, wrongState }
+export { changeEdit, requireState, requireVersion, wrongState }
 
 import { and, eq, inArray, sql } from 'drizzle-orm'
 import type { Database, Transaction } from '../db/client.ts'
@@ -6,7 +6,7 @@ import { edits } from '../db/schema/index.ts'
 import { ConflictError, NotFoundError, PreconditionFailedError, type AppError } from '../errors.ts'
 import { EDIT_STATES, canChangeState, type EditAction, type EditState } from '#shared/vocabulary/edit-states.ts'
 
-type Change = Partial<Pick<typeof edits.$inferInsert, 'content' | 'summary' | 'state' | 'baseEditionId' | 'sentAt'>>
+type Change = Partial<Pick<typeof edits.$inferInsert, 'content' | 'summary' | 'state' | 'baseEditionId' | 'sentAt' | 'changes'>>
 
 /**
  * The one statement by which an edit changes: only if it still is the version that was seen, in a state that allows the

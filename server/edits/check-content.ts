@@ -4,10 +4,10 @@ export type { CheckedContent }
 import type { ServiceContext } from '../context.ts'
 import { adjustables } from '../db/schema/index.ts'
 import { AppError, ValidationError, isAppError, type FieldProblem } from '../errors.ts'
-import type { RenderResult } from '../rendering/index.ts'
+import { holdsBack, type RenderOrder, type RenderResult } from '../rendering/index.ts'
 import { withoutEmptyRows } from '#shared/editing/whole-rows.ts'
 import { GuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
-import { missedExamples, runWorkedExamples } from './worked-examples.ts'
+import { missedExamples, runWorkedExamples } from '#shared/guides/worked-examples.ts'
 
 interface CheckedContent {
   content: GuideContent
@@ -15,8 +15,8 @@ interface CheckedContent {
 }
 
 /**
- * Whether a draft could be published as it is: whole, with effects on things that exist, a body that renders without
- * problems and worked examples that match. Renders the body, so it is called before a transaction, never inside one.
+ * Whether a draft could be published as it is: whole, with effects on things that exist, a body that renders with all that it
+ * asks for, and worked examples that match. What the renderer only remarks on is shown to writer and moderator, who judge. Renders the body, so it is called before a transaction, never inside one.
  * @throws ValidationError (422) that names every field to mend
  */
 async function checkContent(ctx: Pick<ServiceContext, 'db' | 'renderer' | 'calculators'>, draft: GuideDraft): Promise<CheckedContent> {
@@ -30,9 +30,9 @@ async function checkContent(ctx: Pick<ServiceContext, 'db' | 'renderer' | 'calcu
     if (known.has(effect.adjustable)) return
     problems.push({ field: `content.effects.${n}.adjustable`, message: 'What you change: choose one from the list.' })
   })
-  const rendering = draft.body.trim() === '' ? null : await renderBody(ctx, draft.body)
+  const rendering = draft.body.trim() === '' ? null : await renderBody(ctx, draft.body, { urgent: true })
   if (rendering !== null) {
-    const said = rendering.problems.map((problem) => `Line ${problem.line}: ${problem.message}`)
+    const said = rendering.problems.filter(holdsBack).map((problem) => `Line ${problem.line}: ${problem.message}`)
     const missed = missedExamples(runWorkedExamples(ctx, rendering.parts))
     for (const message of [...said, ...missed]) problems.push({ field: 'content.body', message })
   }
@@ -43,9 +43,9 @@ async function checkContent(ctx: Pick<ServiceContext, 'db' | 'renderer' | 'calcu
 }
 
 /** Renders a body; what the renderer refuses is said at the field where the body stands. */
-async function renderBody(ctx: Pick<ServiceContext, 'renderer'>, body: string): Promise<RenderResult> {
+async function renderBody(ctx: Pick<ServiceContext, 'renderer'>, body: string, order: RenderOrder): Promise<RenderResult> {
   try {
-    return await ctx.renderer.render(body)
+    return await ctx.renderer.render(body, order)
   } catch (error) {
     if (!isAppError(error)) throw error
     const fields = error.fields.map(({ field, message }) => ({ field: field === 'body' ? 'content.body' : field, message }))

@@ -3,7 +3,7 @@ export { createEdit }
 import { and, eq, inArray } from 'drizzle-orm'
 import type { z } from 'zod'
 import type { ServiceContext, SignedIn } from '../context.ts'
-import { chapters, editions, edits, guides } from '../db/schema/index.ts'
+import { chapters, editions, edits, guides, wantedGuides } from '../db/schema/index.ts'
 import { NotFoundError } from '../errors.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { requirePermission } from '../people/permissions.ts'
@@ -21,17 +21,34 @@ import type { EditView } from './views.ts'
 async function createEdit(ctx: ServiceContext, input: z.input<typeof CreateInput>): Promise<{ edit: EditView; created: boolean }> {
   requirePermission(ctx.actor, 'edit.create')
   await ctx.rateLimits.take('write', ctx.actor.id)
-  const wanted = parseInput(CreateInput, input)
-  const { id, created } = 'chapter' in wanted
-    ? { id: await beginNewGuide(ctx, ctx.actor, wanted.chapter), created: true }
-    : await beginImprovement(ctx, ctx.actor, wanted)
+  const start = parseInput(CreateInput, input)
+  const { id, created } = 'chapter' in start
+    ? { id: await beginNewGuide(ctx, ctx.actor, start), created: true }
+    : await beginImprovement(ctx, ctx.actor, start)
   return { edit: await editView(ctx, id), created }
 }
 
-async function beginNewGuide(ctx: ServiceContext, actor: SignedIn, letter: string): Promise<string> {
+interface NewGuideStart {
+  chapter: string
+  wanted?: string | undefined
+}
+
+async function beginNewGuide(ctx: ServiceContext, actor: SignedIn, start: NewGuideStart): Promise<string> {
+  const { chapter: letter, wanted } = start
   const [chapter] = await ctx.db.select({ letter: chapters.letter }).from(chapters).where(eq(chapters.letter, letter))
   if (chapter === undefined) throw new NotFoundError('chapter', letter)
-  return insertDraft(ctx, { chapter: letter, authorId: actor.id, content: emptyGuideContent() }).then((id) => id!)
+  const wish = wanted === undefined ? null : await findWish(ctx, letter, wanted)
+  const content = { ...emptyGuideContent(), title: wish?.title ?? '' }
+  return insertDraft(ctx, { chapter: letter, authorId: actor.id, content, wantedId: wish?.id ?? null }).then((id) => id!)
+}
+
+/** Null too where somebody's guide has granted it meanwhile: then there is nothing to grant, and writing may begin all the same. */
+async function findWish(ctx: ServiceContext, chapter: string, id: string) {
+  const [wish] = await ctx.db
+    .select({ id: wantedGuides.id, title: wantedGuides.title })
+    .from(wantedGuides)
+    .where(and(eq(wantedGuides.id, id), eq(wantedGuides.chapter, chapter)))
+  return wish ?? null
 }
 
 async function beginImprovement(

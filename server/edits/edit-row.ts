@@ -4,7 +4,7 @@ export type { EditRow }
 import { eq, sql, type SQL } from 'drizzle-orm'
 import { alias } from 'drizzle-orm/pg-core'
 import type { ServiceContext } from '../context.ts'
-import { chapters, editions, edits, guides, members } from '../db/schema/index.ts'
+import { chapters, editions, edits, guides, members, reviews } from '../db/schema/index.ts'
 import { markOf, titleOf } from '../guides/edition-columns.ts'
 import type { EditEntry } from './views.ts'
 
@@ -30,6 +30,13 @@ async function listEditRows(
   return selectEdits(ctx, { text: false }).where(where).orderBy(...order).limit(limit).offset(offset)
 }
 
+/** Of an edit that is back with its writer: what it was given back with. */
+const lastAsked = sql<EditEntry['asked']>`(
+  select json_build_object('reason', ${reviews.reason}, 'reviewer', json_build_object('id', ${members.id}, 'name', ${members.name}))
+  from ${reviews} join ${members} on ${members.id} = ${reviews.reviewerId}
+  where ${reviews.editId} = ${edits.id} and ${reviews.decision} = 'ask' and ${edits.state} = 'changes_asked'
+  order by ${reviews.decidedAt} desc limit 1)`
+
 function selectEdits(ctx: Pick<ServiceContext, 'db'>, { text }: { text: boolean }) {
   return ctx.db
     .select({
@@ -42,6 +49,9 @@ function selectEdits(ctx: Pick<ServiceContext, 'db'>, { text }: { text: boolean 
       createdAt: edits.createdAt,
       updatedAt: edits.updatedAt,
       sentAt: edits.sentAt,
+      changes: edits.changes,
+      wantedId: edits.wantedId,
+      asked: lastAsked,
       authorId: edits.authorId,
       author: { id: authors.id, name: authors.name, email: authors.email },
       guideId: edits.guideId,
@@ -83,5 +93,7 @@ function entryOf(row: ListedRow): EditEntry {
     createdAt: row.createdAt.toISOString(),
     updatedAt: row.updatedAt.toISOString(),
     sentAt: row.sentAt?.toISOString() ?? null,
+    changes: row.changes,
+    asked: row.asked,
   }
 }

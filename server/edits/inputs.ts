@@ -1,13 +1,14 @@
-export { CreateInput, DecisionInput, MergeInput, NoteInput, PreviewInput, ReasonInput, SaveInput, SendInput, VersionInput }
+export { CreateInput, DecisionInput, MergeInput, NoteInput, PreviewInput, ReasonInput, SaveInput, SendInput, Summary, VersionInput }
 
 import { z } from 'zod'
+import { SLUG } from '../guides/slug.ts'
 import { GUIDE_LIMITS, GuideDraft } from '#shared/schemas/guide-content.ts'
 import { cleanText, optionalText } from '#shared/schemas/text.ts'
 
 const version = z.int({ error: 'Version: a whole number.' }).min(-1)
-const slug = z.string().regex(/^[a-z0-9-]{1,90}$/, { error: 'Guide: there is none with this address.' })
+const slug = z.string().regex(SLUG, { error: 'Guide: there is none with this address.' })
 const edition = z.int({ error: 'Edition: a whole number.' }).min(1).max(2_147_483_647)
-const summary = cleanText('What you changed', 3, GUIDE_LIMITS.summary)
+const Summary = cleanText('What you changed', 3, GUIDE_LIMITS.summary)
 
 // Half of a pair of UTF-16 units is no character, and PostgreSQL's jsonb refuses it.
 const brokenCharacter = /\p{Surrogate}/u
@@ -28,20 +29,23 @@ const words = (what: string, min: number) =>
     .string({ error: `${what}: write some text.` })
     .transform((text) => text.replace(/\r\n?/g, '\n').trim())
     .refine((text) => !/[\u0000-\u0008\u000b-\u001f\u007f]/.test(text), { error: `${what}: it holds a character that cannot be stored.` })
-    .refine((text) => !brokenCharacter.test(text), { error: `${what}: it holds a broken character. Delete it and type it again.` })
+    .refine((text) => !brokenCharacter.test(text), { error: `${what}: ${BROKEN}` })
     .refine((text) => [...text].length >= min, { error: `${what}: write at least ${min} character${min === 1 ? '' : 's'}.` })
     .refine((text) => [...text].length <= 2_000, { error: `${what}: keep it under 2,001 characters.` })
 
 const CreateInput = z.union(
   [
     z.strictObject({ guideSlug: slug, restoreEdition: edition.optional() }),
-    z.strictObject({ chapter: z.string().regex(/^[A-Z]$/, { error: 'Chapter: choose one from the list.' }) }),
+    z.strictObject({
+      chapter: z.string().regex(/^[A-Z]$/, { error: 'Chapter: choose one from the list.' }),
+      wanted: z.uuid({ error: 'Wanted guide: there is none with this id.' }).optional(),
+    }),
   ],
   { error: 'Say which guide to improve, or in which chapter a new one belongs.' },
 )
 const SaveInput = z.strictObject({ version, content, summary: optionalText('What you changed', GUIDE_LIMITS.summary) })
-const SendInput = z.strictObject({ version, summary: summary.optional() })
-const MergeInput = z.strictObject({ version, baseEdition: edition, content, summary: summary.optional() })
+const SendInput = z.strictObject({ version, summary: Summary.optional() })
+const MergeInput = z.strictObject({ version, baseEdition: edition, content, summary: Summary.optional() })
 const VersionInput = z.strictObject({ version })
 const DecisionInput = z.strictObject({ version, note: words('Note', 0).default('') })
 const ReasonInput = z.strictObject({ version, reason: words('Reason', 3) })

@@ -1,7 +1,7 @@
 export { listEdits }
 export type { EditList, EditListQuery }
 
-import { and, asc, count, desc, eq, ne, type SQL } from 'drizzle-orm'
+import { and, asc, count, desc, eq, isNotNull, type SQL } from 'drizzle-orm'
 import type { ServiceContext } from '../context.ts'
 import { edits } from '../db/schema/index.ts'
 import { requirePermission, requireSignedIn } from '../people/permissions.ts'
@@ -13,7 +13,7 @@ const EDITS_PER_PAGE = 50
 
 interface EditListQuery {
   state?: EditState | undefined
-  /** `everyone` is for moderators, and never shows drafts. @default 'mine' */
+  /** `everyone` is for moderators, and never shows what was not handed in. @default 'mine' */
   whose?: 'mine' | 'everyone' | undefined
   page?: number | undefined
 }
@@ -29,7 +29,7 @@ interface EditList {
 async function listEdits(ctx: ServiceContext, { state, whose = 'mine', page = 1 }: EditListQuery = {}): Promise<EditList> {
   requireSignedIn(ctx.actor, 'see your edits')
   if (whose === 'everyone') requirePermission(ctx.actor, 'queue.read')
-  const scope: SQL | undefined = whose === 'everyone' ? ne(edits.state, 'draft') : eq(edits.authorId, ctx.actor.id)
+  const scope: SQL | undefined = whose === 'everyone' ? isNotNull(edits.sentAt) : eq(edits.authorId, ctx.actor.id)
   const where = and(scope, state === undefined ? undefined : eq(edits.state, state))
   const order = whose === 'everyone' && state === 'in_review' ? [asc(edits.sentAt)] : [desc(edits.updatedAt)]
   const [rows, [totals]] = await Promise.all([

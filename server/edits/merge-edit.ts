@@ -27,6 +27,7 @@ async function mergeEdit(ctx: ServiceContext, { id, ...input }: { id: string } &
   }
   await changeEdit(ctx.db, { id, version }, 'save', {
     content,
+    changes: null,
     baseEditionId: edit.publishedEditionId,
     ...(summary === undefined ? {} : { summary }),
   })

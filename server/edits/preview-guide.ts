@@ -5,11 +5,12 @@ import type { ServiceContext } from '../context.ts'
 import { effectRow, findAdjustables } from '../effects/index.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { requirePermission } from '../people/permissions.ts'
+import { holdsBack } from '../rendering/index.ts'
 import type { GuideDraft } from '#shared/schemas/guide-content.ts'
 import { renderBody } from './check-content.ts'
 import { PreviewInput } from './inputs.ts'
 import type { Preview } from './views.ts'
-import { runWorkedExamples } from './worked-examples.ts'
+import { runWorkedExamples } from '#shared/guides/worked-examples.ts'
 
 /**
  * A draft exactly as publishing would store it: the same renderer, the same words for effects.
@@ -19,11 +20,12 @@ async function previewGuide(ctx: ServiceContext, input: z.input<typeof PreviewIn
   requirePermission(ctx.actor, 'preview.render')
   await ctx.rateLimits.take('preview', ctx.actor.id)
   const { content } = parseInput(PreviewInput, input)
-  return previewOf(ctx, content)
+  return previewOf(ctx, content, ctx.actor.id)
 }
 
-async function previewOf(ctx: ServiceContext, content: GuideDraft): Promise<Preview> {
-  const { html, parts, headings, problems } = await renderBody(ctx, content.body)
+/** @param owner the member who looks at it: nobody has more than a few being made at once */
+async function previewOf(ctx: ServiceContext, content: GuideDraft, owner: string): Promise<Preview> {
+  const { html, parts, headings, problems } = await renderBody(ctx, content.body, { owner })
   const named = parts.flatMap((part) => (part.kind === 'effects' ? [part.adjustable] : []))
   const adjustables = await findAdjustables(ctx, [...content.effects.map((effect) => effect.adjustable), ...named])
   const byKey = new Map(adjustables.map((adjustable) => [adjustable.key, adjustable]))
@@ -32,7 +34,7 @@ async function previewOf(ctx: ServiceContext, content: GuideDraft): Promise<Prev
     parts,
     headings,
     effects: content.effects.map((effect) => effectRow(effect, byKey.get(effect.adjustable))),
-    problems,
+    problems: problems.map((problem) => ({ ...problem, holds: holdsBack(problem) })),
     workedExamples: runWorkedExamples(ctx, parts),
     adjustables,
   }

@@ -18,6 +18,6 @@ async function saveEdit(ctx: ServiceContext, { id, ...input }: { id: string } & 
   await ctx.rateLimits.take('write', edit.authorId)
   const { version, content, summary } = parseInput(SaveInput, input)
   requireState(edit, 'save')
-  await changeEdit(ctx.db, { id, version }, 'save', { content, summary })
+  await changeEdit(ctx.db, { id, version }, 'save', { content, summary, changes: null })
   return editView(ctx, id)
 }

@@ -29,6 +29,7 @@ async function sendBack(
   const edit = await loadEdit(ctx, id, 'edit.decide')
   const { actor } = ctx
   requirePermission(actor, 'edit.decide', edit)
+  await ctx.rateLimits.take('write', actor.id)
   const { version, reason } = parseInput(ReasonInput, input)
   requireState(edit, decision)
   const { state, mail } = outcomes[decision]

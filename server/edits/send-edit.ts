@@ -8,20 +8,17 @@ import { edits, members } from '../db/schema/index.ts'
 import { ConflictError, ValidationError } from '../errors.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { recordAudit } from '../records/audit.ts'
-import { GUIDE_LIMITS } from '#shared/schemas/guide-content.ts'
-import { cleanText } from '#shared/schemas/text.ts'
 import { baseMovedError, mergeWithPublished } from './base-moved.ts'
 import { changeEdit, requireState, requireVersion } from './change-edit.ts'
 import { checkContent } from './check-content.ts'
 import { editView } from './edit-view.ts'
-import { SendInput } from './inputs.ts'
+import { countChanges } from './edition-content.ts'
+import { SendInput, Summary } from './inputs.ts'
 import { loadEdit } from './load-edit.ts'
 import type { EditView } from './views.ts'
 
 /** How many edits one member may have waiting at the review desk. */
 const MOST_WAITING = 5
-
-const Summary = cleanText('What you changed', 3, GUIDE_LIMITS.summary)
 
 /**
  * Hands an edit in for review. It has to be whole by now. If another edition was published meanwhile, the two are put
@@ -45,6 +42,8 @@ async function sendEdit(
   const moved = await mergeWithPublished(ctx, edit)
   if (moved !== null && !moved.mergeable) throw baseMovedError(moved)
   const { content } = await checkContent(ctx, moved?.merged ?? edit.content)
+  const baseEditionId = moved === null ? edit.baseEditionId : edit.publishedEditionId
+  const changes = await countChanges(ctx, baseEditionId, content)
   await ctx.db.transaction(async (tx) => {
     await requireRoomAtTheDesk(tx, edit.authorId)
     const sent = await changeEdit(tx, { id, version }, 'send', {
@@ -52,7 +51,8 @@ async function sendEdit(
       summary: summary.data,
       state: 'in_review',
       sentAt: ctx.clock(),
-      ...(moved === null ? {} : { baseEditionId: edit.publishedEditionId }),
+      changes,
+      baseEditionId,
     })
     await recordAudit({ ...ctx, db: tx }, {
       action: 'edit.send', subjectKind: 'edit', subjectId: id, details: { version: sent, mergedWith: moved?.edition ?? null },

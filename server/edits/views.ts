@@ -2,11 +2,13 @@ export type { BaseMoved, EditEntry, EditView, Preview }
 
 import type { AdjustableView, EffectRow } from '../effects/index.ts'
 import type { ChapterName, Person } from '../guides/views.ts'
-import type { Heading, RenderedPart, RenderProblem } from '../rendering/index.ts'
+import type { Heading, RenderProblem } from '../rendering/index.ts'
+import type { RenderedPart } from '#shared/rendering/parts.ts'
+import type { ChangeSizes } from '#shared/editing/compare-guides.ts'
 import type { MergeConflict } from '#shared/editing/merge-guides.ts'
 import type { GuideDraft } from '#shared/schemas/guide-content.ts'
 import type { EditState } from '#shared/vocabulary/edit-states.ts'
-import type { WorkedExample } from './worked-examples.ts'
+import type { WorkedExample } from '#shared/guides/worked-examples.ts'
 
 /** An edit in a list. Dates are ISO 8601. */
 interface EditEntry {
@@ -26,6 +28,10 @@ interface EditEntry {
   createdAt: string
   updatedAt: string
   sentAt: string | null
+  /** How much it changes against the edition it started from, as handed in; null while it is being written. */
+  changes: ChangeSizes | null
+  /** What a moderator asks for, while the edit is back with its writer. */
+  asked: { reason: string; reviewer: Person } | null
 }
 
 /** Another edition was published since this edit began; `merged` holds both where they do not conflict. */
@@ -54,8 +60,8 @@ interface Preview {
   parts: RenderedPart[]
   headings: Heading[]
   effects: EffectRow[]
-  /** What has to be mended before the edit can be sent; `line` counts in the Markdown. */
-  problems: RenderProblem[]
+  /** What laying it out has found; `line` counts in the Markdown. What `holds` has to be mended before the edit can be sent. */
+  problems: (RenderProblem & { holds: boolean })[]
   /** Each worked example, run just now. */
   workedExamples: WorkedExample[]
   adjustables: AdjustableView[]

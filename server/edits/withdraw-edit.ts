@@ -13,6 +13,7 @@ import type { EditView } from './views.ts'
 /** The writer takes an edit back. Its words stay readable to them. */
 async function withdrawEdit(ctx: ServiceContext, { id, ...input }: { id: string } & z.input<typeof VersionInput>): Promise<EditView> {
   const edit = await loadEdit(ctx, id, 'edit.withdraw')
+  await ctx.rateLimits.take('write', edit.authorId)
   const { version } = parseInput(VersionInput, input)
   requireState(edit, 'withdraw')
   await ctx.db.transaction(async (tx) => {

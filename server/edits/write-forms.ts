@@ -57,8 +57,8 @@ function editId(req: Request): string {
 }
 
 function startingPoint(fields: FormFields): Parameters<typeof createEdit>[1] {
-  const { guideSlug, chapter, restoreEdition } = fields
-  if (guideSlug === undefined) return { chapter: chapter ?? '' }
+  const { guideSlug, chapter, wanted, restoreEdition } = fields
+  if (guideSlug === undefined) return { chapter: chapter ?? '', ...(wanted ? { wanted } : {}) }
   return restoreEdition === undefined ? { guideSlug } : { guideSlug, restoreEdition: Number(restoreEdition) }
 }
 

@@ -9,6 +9,7 @@ import { NotFoundError } from '../errors.ts'
 import { compareGuides, type GuideComparison } from '#shared/editing/compare-guides.ts'
 import { markOf } from './edition-columns.ts'
 import { findMoved } from './edition-query.ts'
+import { SLUG } from './slug.ts'
 import type { ChapterName, EditionName, Moved } from './views.ts'
 
 interface EditionComparison {
@@ -29,7 +30,7 @@ async function compareEditions(
   { slug, from, to }: { slug: string; from: number; to: number },
 ): Promise<EditionComparison | Moved> {
   const numbers = [from, to].filter((number) => Number.isInteger(number) && number >= 1 && number <= 2_147_483_647)
-  const rows = /^[a-z0-9-]{1,90}$/.test(slug) && numbers.length === 2
+  const rows = SLUG.test(slug) && numbers.length === 2
     ? await ctx.db
         .select({
           chapter: { letter: chapters.letter, name: chapters.name },

@@ -5,9 +5,8 @@ import { and, eq, sql, type SQL } from 'drizzle-orm'
 import { alias } from 'drizzle-orm/pg-core'
 import type { ServiceContext } from '../context.ts'
 import { chapters, editions, guides, members, slugRedirects } from '../db/schema/index.ts'
+import { SLUG } from './slug.ts'
 import type { Moved } from './views.ts'
-
-const SLUG = /^[a-z0-9-]{1,90}$/
 
 const authors = alias(members, 'authors')
 const approvers = alias(members, 'approvers')

@@ -6,10 +6,10 @@ import { alias } from 'drizzle-orm/pg-core'
 import type { ServiceContext } from '../context.ts'
 import { chapters, editions, edits, guides, members, reviews } from '../db/schema/index.ts'
 import { NotFoundError } from '../errors.ts'
-import { compareGuides, type ChangeSizes } from '#shared/editing/compare-guides.ts'
-import { emptyGuideContent } from '#shared/schemas/guide-content.ts'
+import { noChanges, type ChangeSizes } from '#shared/editing/compare-guides.ts'
 import { markOf, titleOf } from './edition-columns.ts'
 import { findMoved } from './edition-query.ts'
+import { SLUG } from './slug.ts'
 import type { ChapterName, Moved, Person } from './views.ts'
 
 const EDITIONS_PER_PAGE = 20
@@ -53,17 +53,15 @@ async function getHistory(
     throw new NotFoundError('guide', slug)
   }
   const pages = Math.max(1, Math.ceil(guide.editions / EDITIONS_PER_PAGE))
-  // One more than the page shows: the oldest shown is compared with it, and declined edits reach down to it.
-  const rows = await listEditions(ctx, guide.id, (page - 1) * EDITIONS_PER_PAGE, EDITIONS_PER_PAGE + 1)
-  const shown = rows.slice(0, EDITIONS_PER_PAGE)
-  const laid = shown.map((row, at): HistoryLayer => ({
+  const shown = await listEditions(ctx, guide.id, (page - 1) * EDITIONS_PER_PAGE, EDITIONS_PER_PAGE)
+  const laid = shown.map((row): HistoryLayer => ({
     kind: 'edition',
     number: row.number,
     summary: row.summary,
     author: row.author,
     approver: row.approver,
     publishedAt: row.publishedAt.toISOString(),
-    changes: compareGuides(rows[at + 1]?.content ?? emptyGuideContent(), row.content).counts,
+    changes: { ...noChanges, ...row.changes },
   }))
   const newest = page === 1 ? null : (await listEditions(ctx, guide.id, (page - 1) * EDITIONS_PER_PAGE - 1, 1))[0]?.publishedAt ?? null
   const declined = shown.length === 0 ? [] : await listDeclined(ctx, guide.id, shown.at(-1)!.publishedAt, newest)
@@ -85,7 +83,7 @@ function timeOf(layer: HistoryLayer): string {
 }
 
 async function findGuide(ctx: Pick<ServiceContext, 'db'>, slug: string) {
-  if (!/^[a-z0-9-]{1,90}$/.test(slug)) return null
+  if (!SLUG.test(slug)) return null
   const all = alias(editions, 'all_editions')
   const [row] = await ctx.db
     .select({
@@ -112,7 +110,7 @@ async function listEditions(ctx: Pick<ServiceContext, 'db'>, guideId: string, of
     .select({
       number: editions.number,
       summary: editions.summary,
-      content: editions.content,
+      changes: editions.changes,
       publishedAt: editions.publishedAt,
       author: { id: authors.id, name: authors.name },
       approver: { id: approvers.id, name: approvers.name },

@@ -19,6 +19,7 @@ export { listGuides } from './list-guides.ts'
 export { listSitemapEntries } from './list-sitemap-entries.ts'
 export { listWantedGuides } from './list-wanted-guides.ts'
 export { publishEdition } from './publish-edition.ts'
+export { removeWish } from './remove-wish.ts'
 export { renewRenderings } from './renew-renderings.ts'
 export { seedGuide } from './seed-guide.ts'
 export type {

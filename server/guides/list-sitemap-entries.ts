@@ -1,5 +1,4 @@
 export { listSitemapEntries }
-export type { SitemapEntry }
 
 import { asc, eq } from 'drizzle-orm'
 import type { ServiceContext } from '../context.ts'

@@ -8,7 +8,7 @@ import type { WantedGuide } from './views.ts'
 /** Guides that the book still lacks, of all chapters or of one. */
 async function listWantedGuides(ctx: Pick<ServiceContext, 'db'>, chapter?: string): Promise<WantedGuide[]> {
   return ctx.db
-    .select({ chapter: wantedGuides.chapter, title: wantedGuides.title, why: wantedGuides.why })
+    .select({ id: wantedGuides.id, chapter: wantedGuides.chapter, title: wantedGuides.title, why: wantedGuides.why })
     .from(wantedGuides)
     .where(chapter === undefined ? undefined : eq(wantedGuides.chapter, chapter))
     .orderBy(asc(wantedGuides.chapter), asc(wantedGuides.title))

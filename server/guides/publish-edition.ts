@@ -1,12 +1,12 @@
 export { publishEdition }
-export type { NewEdition }
 
-import { eq, max } from 'drizzle-orm'
+import { desc, eq } from 'drizzle-orm'
 import type { Transaction } from '../db/client.ts'
 import { editions, effects, guides } from '../db/schema/index.ts'
 import { NotFoundError } from '../errors.ts'
 import type { RenderResult } from '../rendering/index.ts'
-import type { GuideContent } from '#shared/schemas/guide-content.ts'
+import { compareGuides } from '#shared/editing/compare-guides.ts'
+import { emptyGuideContent, type GuideContent } from '#shared/schemas/guide-content.ts'
 
 interface NewEdition {
   guideId: string
@@ -29,7 +29,12 @@ async function publishEdition(tx: Transaction, edition: NewEdition): Promise<{ e
   const { guideId, content, rendering } = edition
   const [guide] = await tx.select({ id: guides.id }).from(guides).where(eq(guides.id, guideId)).for('update')
   if (guide === undefined) throw new NotFoundError('guide', guideId)
-  const [last] = await tx.select({ number: max(editions.number) }).from(editions).where(eq(editions.guideId, guideId))
+  const [last] = await tx
+    .select({ number: editions.number, content: editions.content })
+    .from(editions)
+    .where(eq(editions.guideId, guideId))
+    .orderBy(desc(editions.number))
+    .limit(1)
   const number = (last?.number ?? 0) + 1
   const [row] = await tx
     .insert(editions)
@@ -44,6 +49,7 @@ async function publishEdition(tx: Transaction, edition: NewEdition): Promise<{ e
       approverId: edition.approverId,
       editId: edition.editId,
       summary: edition.summary,
+      changes: compareGuides(last?.content ?? emptyGuideContent(), content).counts,
       ...(edition.publishedAt === undefined ? {} : { publishedAt: edition.publishedAt }),
     })
     .returning({ id: editions.id })

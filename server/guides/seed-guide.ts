@@ -30,7 +30,7 @@ async function seedGuide(
   const { slug, chapter, number, content, authorId, approverId, summary = 'First edition', publishedAt } = guide
   const [known] = await app.db.select({ id: guides.id }).from(guides).where(eq(guides.slug, slug))
   if (known !== undefined) return { slug, created: false }
-  const rendering = await app.renderer.render(content.body)
+  const rendering = await app.renderer.render(content.body, { urgent: true })
   if (rendering.problems.length > 0) {
     const lines = rendering.problems.map((problem) => `  line ${problem.line}: ${problem.message}`)
     throw new Error(`The guide “${slug}” cannot be published:\n${lines.join('\n')}`)

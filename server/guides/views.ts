@@ -3,7 +3,8 @@ export type {
 }
 
 import type { AdjustableView, EffectRow } from '../effects/index.ts'
-import type { Heading, RenderedPart } from '../rendering/index.ts'
+import type { Heading } from '../rendering/index.ts'
+import type { RenderedPart } from '#shared/rendering/parts.ts'
 import type { ChangeSizes } from '#shared/editing/compare-guides.ts'
 import type { GuideContent } from '#shared/schemas/guide-content.ts'
 import type { Phase } from '#shared/vocabulary/phases.ts'
@@ -87,6 +88,7 @@ interface FreshInkEntry {
 }
 
 interface WantedGuide {
+  id: string
   chapter: string
   title: string
   why: string

@@ -8,11 +8,14 @@ import { idempotencyKeys } from '../db/schema/index.ts'
 import { AppError, ConflictError, ValidationError } from '../errors.ts'
 
 const KEPT = sql`interval '24 hours'`
+// Longer than a request may take (30 seconds), so that whoever made a claim this old has stopped without an answer.
+const GIVEN_UP_AFTER = sql`interval '60 seconds'`
 
 /**
  * Makes a write route act once for one `Idempotency-Key` (draft-ietf-httpapi-idempotency-key-header): the same request
- * again gets the stored answer, another request under the same key 422, one that is still running 409. Keys belong to
- * a member and are kept for 24 hours. The header is optional: forms are guarded by the version they carry.
+ * again gets the stored answer, another request under the same key 422, one that is still running 409. A claim whose
+ * server was killed before it answered is taken over by one of the next requests after a minute. Keys belong to a
+ * member and are kept for 24 hours. The header is optional: forms are guarded by the version they carry.
  */
 function idempotent(app: App): RequestHandler {
   return async (req, res, next) => {
@@ -28,12 +31,27 @@ function idempotent(app: App): RequestHandler {
     const requestHash = hashOf(req)
     const mine = and(eq(idempotencyKeys.memberId, actor.id), eq(idempotencyKeys.key, key))
     await app.db.delete(idempotencyKeys).where(and(mine, sql`${idempotencyKeys.createdAt} < now() - ${KEPT}`))
+    // Of any number of requests that ask at the same time one changes the row; the others then find it young again.
+    const takeOver = async () => {
+      const taken = await app.db
+        .update(idempotencyKeys)
+        .set({ createdAt: sql`now()` })
+        .where(
+          and(
+            mine,
+            eq(idempotencyKeys.requestHash, requestHash),
+            isNull(idempotencyKeys.status),
+            sql`${idempotencyKeys.createdAt} < now() - ${GIVEN_UP_AFTER}`,
+          ),
+        )
+      return taken.rowCount === 1
+    }
     const claimed = await app.db
       .insert(idempotencyKeys)
       .values({ memberId: actor.id, key, requestHash })
       .onConflictDoNothing()
       .returning({ key: idempotencyKeys.key })
-    if (claimed.length === 0) {
+    if (claimed.length === 0 && !(await takeOver())) {
       const [earlier] = await app.db.select().from(idempotencyKeys).where(mine)
       if (earlier !== undefined && earlier.requestHash !== requestHash) {
         throw new AppError('idempotency_key_reused', 422, 'That Idempotency-Key was used for another request.')
@@ -44,15 +62,25 @@ function idempotent(app: App): RequestHandler {
       res.status(earlier.status).set(earlier.headers ?? {}).json(earlier.body)
       return
     }
-    keepAnswer(res, async (status, body) => {
+    const unclaim = () => app.db.delete(idempotencyKeys).where(and(mine, isNull(idempotencyKeys.status)))
+    const store = async (status: number, body: unknown) => {
       // An answer that may turn out differently next time is not kept, so that trying again can succeed.
       if (status >= 500 || status === 429) {
-        await app.db.delete(idempotencyKeys).where(and(mine, isNull(idempotencyKeys.status)))
+        await unclaim()
         return
       }
       const etag = res.getHeader('etag')
       const headers: Record<string, string> = typeof etag === 'string' ? { ETag: etag } : {}
       await app.db.update(idempotencyKeys).set({ status, body, headers }).where(mine)
+    }
+    keepAnswer(res, async (status, body) => {
+      try {
+        await store(status, body)
+      } catch (error) {
+        req.ctx.log.error({ err: error }, 'an answer could not be kept')
+        // Asking again has to be possible; a claim without an answer would refuse it for a minute.
+        await unclaim()
+      }
     })
     next()
   }

@@ -9,7 +9,8 @@ const compressBrotli = promisify(brotliCompress)
 const compressGzip = promisify(gzip)
 
 interface CachedPage {
-  etag: string
+  /** Of the page's bytes before compression. */
+  hash: string
   contentType: string
   identity: Buffer
   gzip: Buffer
@@ -69,8 +70,8 @@ function createPageCache(maxBytes: number): PageCache {
         compressGzip(identity, { level: 6 }),
         compressBrotli(identity, { params: { [constants.BROTLI_PARAM_QUALITY]: 6 } }),
       ])
-      const etag = `"${createHash('sha256').update(identity).digest('base64url').slice(0, 27)}"`
-      const page = { etag, contentType, identity, gzip: zipped, brotli }
+      const hash = createHash('sha256').update(identity).digest('base64url').slice(0, 27)
+      const page = { hash, contentType, identity, gzip: zipped, brotli }
       if (generation === current && !paused && sizeOf(page) <= maxBytes) {
         forget(key)
         pages.set(key, page)

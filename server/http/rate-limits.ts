@@ -11,7 +11,10 @@ const DAY = 24 * HOUR
 
 /** What may be done how often, and what to say when it is too often. Keys are an address, a member or an account. */
 const RATE_LIMITS = {
-  sign_in_account: { points: 5, seconds: 15 * MINUTE, what: 'Too many wrong passwords for this account' },
+  sign_in_guesser: { points: 5, seconds: 15 * MINUTE, what: 'Too many wrong passwords for this account' },
+  // From all networks together: ten times as many, since a low number would let anyone keep a member out by guessing
+  // badly on purpose. A password of 15 characters is not found by 200 guesses an hour, and those end at the hundredth.
+  sign_in_account: { points: 50, seconds: 15 * MINUTE, what: 'Too many wrong passwords for this account' },
   sign_in_address: { points: 30, seconds: 15 * MINUTE, what: 'Too many wrong passwords from your network' },
   // NIST SP 800-63B: a hundred failures in a row and the password is worth nothing; a reset by mail begins anew.
   sign_in_in_a_row: { points: 100, seconds: 90 * DAY, what: 'Too many wrong passwords. Set a new one by mail' },

@@ -6,16 +6,17 @@ import { renderPage } from 'vike/server'
 import type { ServiceContext } from '../context.ts'
 import { countWaitingEdits } from '../edits/count-waiting.ts'
 import { can } from '../people/permissions.ts'
-import type { FormState, PageReader, Sheet } from './page-context.ts'
+import type { FormState, PageReader } from './page-context.ts'
 import { answerFromMemory, cacheKey } from './serve-cached.ts'
 import { signedInPolicy, visitorPolicy } from './security-headers.ts'
+import { sheetOf } from './sheet.ts'
 import { isVisitorPage } from './visitor-pages.ts'
 
 /** Answers every address that nothing before has answered: as a page of the book, or as its error page. */
 function renderPages(): RequestHandler {
   return async (req, res) => {
-    // Vike would answer a page's whole data under this address; no page of ours is routed in the browser.
-    if (req.path.endsWith('/index.pageContext.json')) {
+    // Vike would answer a page's whole data under this address, however it is spelt; no page of ours is routed in the browser.
+    if (/\.pageContext\.json$/i.test(decodeURIComponent(req.path))) {
       await renderBookPage(req, res, { url: ERROR_PAGE, status: 404 })
       return
     }
@@ -84,9 +85,4 @@ async function pageReader(ctx: ServiceContext): Promise<PageReader | null> {
   if (actor.kind === 'visitor') return null
   const waiting = can(actor, 'queue.read') ? await countWaitingEdits(ctx) : 0
   return { id: actor.id, name: actor.name, role: actor.role, verified: actor.verified, waiting }
-}
-
-function sheetOf(req: Request): Sheet {
-  const chosen = /(?:^|;\s*)sheet=(day|night)(?:;|$)/.exec(req.headers.cookie ?? '')?.[1]
-  return chosen === 'day' || chosen === 'night' ? chosen : null
 }

@@ -5,6 +5,7 @@ import type { App } from '../context.ts'
 import { SESSION_COOKIES } from '../people/session-cookie.ts'
 import type { CachedPage } from './page-cache.ts'
 import { visitorPolicy } from './security-headers.ts'
+import { sheetOf } from './sheet.ts'
 import { isVisitorPage } from './visitor-pages.ts'
 
 /** Answers published pages for visitors from memory, before session, parsers and router. */
@@ -21,42 +22,52 @@ function serveCachedPages(app: App): RequestHandler {
   }
 }
 
+// Other spellings of the same address (%64roop, a doubled slash) are answered too, but one page is kept under one key.
+const CANONICAL = /^\/(?:[A-Za-z0-9-]+(?:\/[A-Za-z0-9-]+)*)?$/
+
 /**
- * What tells two visitors' pages apart: the path and the chosen sheet. Undefined where a page is not the same for all:
- * with a session, or with a query (calculators compute from it).
+ * What tells two visitors' pages apart: the path and the chosen sheet. Undefined where a page is not the same for all: with a
+ * session, or with a query (calculators compute from it).
  */
 function cacheKey(req: Request): string | undefined {
   if (req.method !== 'GET' && req.method !== 'HEAD') return undefined
-  if (req.originalUrl.includes('?')) return undefined
+  if (req.originalUrl.includes('?') || !CANONICAL.test(req.path)) return undefined
   const cookies = req.headers.cookie ?? ''
   if (SESSION_COOKIES.some((name) => cookies.includes(`${name}=`))) return undefined
-  const sheet = /(?:^|;\s*)sheet=(day|night)(?:;|$)/.exec(cookies)?.[1] ?? ''
-  return `${sheet} ${req.path}`
+  return `${sheetOf(req) ?? ''} ${req.path}`
 }
 
+type Encoding = 'br' | 'gzip' | 'identity'
+
 function answerFromMemory(req: Request, res: Response, page: CachedPage): void {
-  const pinned = (req.headers.cookie ?? '').includes('sheet=')
+  const encoding = (req.acceptsEncodings(['br', 'gzip', 'identity']) || 'identity') as Encoding
   res.setHeader('Content-Type', page.contentType)
-  res.setHeader('ETag', page.etag)
+  res.setHeader('ETag', tagOf(page, encoding))
   res.setHeader('Vary', 'Accept-Encoding, Cookie')
   res.setHeader(
     'Cache-Control',
-    pinned ? 'private, max-age=0' : 'public, max-age=0, s-maxage=300, stale-while-revalidate=86400',
+    sheetOf(req) === null ? 'public, max-age=0, s-maxage=300, stale-while-revalidate=86400' : 'private, max-age=0',
   )
-  if (isFresh(req, page.etag)) {
+  if (isFresh(req, page)) {
     res.status(304).end()
     return
   }
-  const encoding = req.acceptsEncodings(['br', 'gzip', 'identity'])
-  const body = encoding === 'br' ? page.brotli : encoding === 'gzip' ? page.gzip : page.identity
-  if (encoding === 'br' || encoding === 'gzip') res.setHeader('Content-Encoding', encoding)
+  const body = { br: page.brotli, gzip: page.gzip, identity: page.identity }[encoding]
+  if (encoding !== 'identity') res.setHeader('Content-Encoding', encoding)
   res.setHeader('Content-Length', body.length)
   res.end(req.method === 'HEAD' ? undefined : body)
 }
 
-// Weak comparison (RFC 9110 §13.1.2): a cache on the way may have weakened our tag when it changed the encoding.
-function isFresh(req: Request, etag: string): boolean {
+// Each encoding is a representation of its own and carries a tag of its own (RFC 9110 §8.8.3.3).
+function tagOf(page: CachedPage, encoding: Encoding): string {
+  return encoding === 'identity' ? `"${page.hash}"` : `"${page.hash}-${encoding}"`
+}
+
+// Weak comparison (RFC 9110 §13.1.2): a cache on the way may have weakened our tag. Whichever encoding the reader holds, the
+// page is the same.
+function isFresh(req: Request, page: CachedPage): boolean {
   const asked = req.headers['if-none-match']
   if (asked === undefined) return false
-  return asked.split(',').some((tag) => tag.trim().replace(/^W\//, '') === etag || tag.trim() === '*')
+  const known = new Set((['br', 'gzip', 'identity'] as const).map((encoding) => tagOf(page, encoding)))
+  return asked.split(',').some((tag) => tag.trim() === '*' || known.has(tag.trim().replace(/^W\//, '')))
 }

@@ -26,7 +26,7 @@ const LOOK_EVERY_MS = 15_000
 /**
  * Sends what stands in the outbox. Any number of workers may run: a mail is claimed by one conditional UPDATE that also
  * sets the time of the next attempt, so that a worker that dies in the middle leaves a mail that is simply due again
- * later, under the same Message-ID.
+ * later, under the same Message-ID. Once a mail is sent or given up its text is blanked: it may hold a link that works.
  * @param options.transport for tests; otherwise the configured mail server or the local capture
  */
 function createMailWorker(
@@ -43,12 +43,13 @@ function createMailWorker(
   async function sendOne(mail: ClaimedMail): Promise<void> {
     try {
       await transport.send(mail)
-      await app.db.execute(sql`update outbox set sent_at = now(), last_error = '' where id = ${mail.id}`)
+      await app.db.execute(sql`update outbox set sent_at = now(), last_error = '', body = '' where id = ${mail.id}`)
     } catch (error) {
       const reason = error instanceof Error ? error.message : String(error)
       const dead = mail.tooOld || isRefusedForGood(error)
       await app.db.execute(sql`
-        update outbox set last_error = ${reason.slice(0, 500)}, dead_at = ${dead ? sql`now()` : sql`null`}
+        update outbox set last_error = ${reason.slice(0, 500)}, dead_at = ${dead ? sql`now()` : sql`null`},
+          body = ${dead ? sql`''` : sql`body`}
         where id = ${mail.id} and sent_at is null`)
       app.log[dead ? 'error' : 'warn']({ mail: mail.id, attempts: mail.attempts, reason }, dead ? 'mail given up' : 'mail not sent yet')
     }

@@ -1,4 +1,4 @@
-export { createTransport, messageIdOf }
+export { createTransport }
 export type { MailTransport, WaitingMail }
 
 import nodemailer from 'nodemailer'
@@ -18,11 +18,18 @@ interface MailTransport {
   close(): void
 }
 
-// Shorter than the first wait of the outbox, so that no other worker picks up a mail whose sending still hangs here.
+// For each step; a server that says a little again and again would stretch the whole beyond any of them.
 const SMTP_PATIENCE = { connectionTimeout: 10_000, greetingTimeout: 10_000, socketTimeout: 20_000 }
 
-/** @param smtpUrl where to send: the configured server, or the local capture */
-function createTransport(config: Config, smtpUrl: string): MailTransport {
+// Shorter than the first wait of the outbox (60 seconds), so that no other worker picks up a mail that is still being sent
+// here: it would arrive twice.
+const SEND_WITHIN_MS = 50_000
+
+/**
+ * @param smtpUrl where to send: the configured server, or the local capture
+ * @param sendWithinMs when the connection is closed whatever is going on
+ */
+function createTransport(config: Pick<Config, 'mailFrom'>, smtpUrl: string, sendWithinMs = SEND_WITHIN_MS): MailTransport {
   const transporter = nodemailer.createTransport({
     url: smtpUrl,
     ...SMTP_PATIENCE,
@@ -39,6 +46,7 @@ function createTransport(config: Config, smtpUrl: string): MailTransport {
         subject: mail.subject,
         text: mail.body,
         messageId: messageIdOf(config, mail.messageId),
+        signal: AbortSignal.timeout(sendWithinMs),
         headers: { 'Auto-Submitted': 'auto-generated' },
       })
     },
@@ -47,7 +55,7 @@ function createTransport(config: Config, smtpUrl: string): MailTransport {
 }
 
 /** RFC 5322, 3.6.4: unique on the left, a domain of our own on the right. */
-function messageIdOf(config: Config, left: string): string {
+function messageIdOf(config: Pick<Config, 'mailFrom'>, left: string): string {
   const domain = /@([A-Za-z0-9.-]+)>?\s*$/.exec(config.mailFrom)?.[1] ?? 'localhost'
   return `<${left}@${domain}>`
 }

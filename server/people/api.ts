@@ -56,7 +56,7 @@ function peopleApi(app: App): Router {
   })
   router.put('/password', async (req, res) => {
     await changePassword(req.ctx, req.body)
-    await renewSession(req)
+    await renewSession(app, req)
     res.status(204).end()
   })
 
@@ -82,7 +82,7 @@ function peopleApi(app: App): Router {
   })
   router.delete('/sessions', async (req, res) => {
     const ended = await endOtherSessions(req.ctx)
-    await renewSession(req)
+    await renewSession(app, req)
     res.json({ ended })
   })
   router.delete('/sessions/:handle', async (req, res) => {

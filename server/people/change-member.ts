@@ -28,14 +28,14 @@ async function changeRole(ctx: ServiceContext, input: unknown): Promise<Member> 
  * @throws as changeRole
  */
 async function changeStatus(ctx: ServiceContext, input: unknown): Promise<Member> {
-  requirePermission(ctx.actor, 'member.change_role')
+  requirePermission(ctx.actor, 'member.suspend')
   const { memberId, status } = parseInput(ChangeStatus, input)
   return changeMember(ctx, memberId, 'member.change_status', { status })
 }
 
 /** Signs a member out everywhere. @throws ForbiddenError (403), NotFoundError (404) */
 async function endMemberSessions(ctx: ServiceContext, input: unknown): Promise<number> {
-  requirePermission(ctx.actor, 'member.change_role')
+  requirePermission(ctx.actor, 'member.suspend')
   const { memberId } = parseInput(EndSessions, input)
   const member = await memberById(ctx.db, memberId)
   const count = await endSessionsOf(ctx.db, member.id)
@@ -73,12 +73,12 @@ async function changeMember(
   })
 }
 
-// Two admins who step down at the same time would otherwise each see the other still there.
+// Those who can act: an admin who has not yet used the first link cannot. Two admins who step down at the same time would otherwise each see the other still there.
 async function lockAdmins(tx: Transaction): Promise<string[]> {
   const rows = await tx
     .select({ id: members.id })
     .from(members)
-    .where(and(eq(members.role, 'admin'), eq(members.status, 'active'), isNotNull(members.passwordHash)))
+    .where(and(eq(members.role, 'admin'), eq(members.status, 'active'), isNotNull(members.emailVerifiedAt)))
     .orderBy(members.id)
     .for('update')
   return rows.map((row) => row.id)

@@ -1,6 +1,6 @@
 export { changePassword }
 
-import { eq } from 'drizzle-orm'
+import { and, eq } from 'drizzle-orm'
 import type { ServiceContext } from '../context.ts'
 import { members } from '../db/schema/index.ts'
 import { AppError, ValidationError } from '../errors.ts'
@@ -12,7 +12,6 @@ import { ChangePassword } from './inputs.ts'
 import { changedPasswordMail } from './mails.ts'
 import { parseInput } from './parse-input.ts'
 import { requireGoodPassword } from './password-rules.ts'
-import { passwordsOf } from './passwords.ts'
 import { requireSignedIn } from './permissions.ts'
 import { invalidateTokens } from './tokens.ts'
 
@@ -28,10 +27,9 @@ async function changePassword(ctx: ServiceContext, input: unknown): Promise<void
   const member = await ownMember({ ...ctx, actor })
   requireGoodPassword(newPassword, { name: member.name, email: member.email, clubName: ctx.config.clubName }, 'newPassword')
   await ctx.rateLimits.take('password_change', actor.id)
-  const passwords = passwordsOf(ctx)
+  const { passwords } = ctx
   if (!(await passwords.matches(member.passwordHash, currentPassword))) {
-    const message = 'Current password: that is not it.'
-    throw new AppError('wrong_password', 403, message, { fields: [{ field: 'currentPassword', message }] })
+    throw wrongPassword('Current password: that is not it.')
   }
   await ctx.rateLimits.reset('password_change', actor.id)
   if (newPassword.normalize('NFC') === currentPassword.normalize('NFC')) {
@@ -40,10 +38,19 @@ async function changePassword(ctx: ServiceContext, input: unknown): Promise<void
   }
   const passwordHash = await passwords.hash(newPassword)
   await ctx.db.transaction(async (tx) => {
-    await tx.update(members).set({ passwordHash }).where(eq(members.id, actor.id))
+    // Only over the hash that was just compared: a reset by mail that was committed meanwhile has to win.
+    const changed = await tx
+      .update(members)
+      .set({ passwordHash })
+      .where(and(eq(members.id, actor.id), eq(members.passwordHash, member.passwordHash)))
+    if (changed.rowCount === 0) throw wrongPassword('Current password: it was changed somewhere else a moment ago.')
     await invalidateTokens(tx, actor.id, ctx.clock())
     await endSessionsOf(tx, actor.id, { except: actor.sessionId })
     await queueMail(tx, changedPasswordMail(ctx.config, member))
     await recordAudit({ ...ctx, db: tx }, { action: 'password.change', ...byThemself(actor.id) })
   })
+}
+
+function wrongPassword(message: string): AppError {
+  return new AppError('wrong_password', 403, message, { fields: [{ field: 'currentPassword', message }] })
 }

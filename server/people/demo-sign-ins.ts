@@ -7,7 +7,6 @@ import { z } from 'zod'
 import type { App } from '../context.ts'
 import { members } from '../db/schema/index.ts'
 import { MEMBER_ROLES, roleNames } from '#shared/vocabulary/roles.ts'
-import { passwordsOf } from './passwords.ts'
 
 const DemoMembers = z.array(
   z.object({
@@ -33,7 +32,7 @@ async function ensureDemoSignIns(app: App): Promise<void> {
       const without = and(eq(members.key, key), isNull(members.passwordHash))
       const [member] = await app.db.select({ id: members.id }).from(members).where(without)
       if (member === undefined) return
-      const passwordHash = await passwordsOf(app).hash(demoPassword)
+      const passwordHash = await app.passwords.hash(demoPassword)
       await app.db
         .update(members)
         .set({ email: demoEmail, passwordHash, emailVerifiedAt: app.clock() })

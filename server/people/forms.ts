@@ -54,12 +54,12 @@ function peopleForms(app: App): Router {
   router.post('/you/password', form('/you', async (req) => {
     const { currentPassword, newPassword } = fields(req)
     await changePassword(req.ctx, { currentPassword, newPassword })
-    await renewSession(req)
+    await renewSession(app, req)
     return '/you?said=password-changed'
   }))
   router.post('/you/sign-out-everywhere', form('/you', async (req) => {
     await endOtherSessions(req.ctx)
-    await renewSession(req)
+    await renewSession(app, req)
     return '/you?said=signed-out-elsewhere'
   }))
   router.post('/you/sessions/:handle/end', form('/you', async (req) => {

@@ -11,7 +11,6 @@ import { takeMailLimits } from './mail-limits.ts'
 import { alreadyJoinedMail, verifyMail } from './mails.ts'
 import { parseInput } from './parse-input.ts'
 import { requireGoodPassword } from './password-rules.ts'
-import { passwordsOf } from './passwords.ts'
 import { issueToken } from './tokens.ts'
 
 // A hash takes about 60 ms and the rows about 10; with the queue of hashes in front of it this still covers both ways.
@@ -28,7 +27,7 @@ async function join(ctx: ServiceContext, input: unknown): Promise<void> {
   await ctx.rateLimits.take('join_address', ctx.address)
   await takeMailLimits(ctx, email)
   await evenAnswer(ANSWER_AFTER_MS, async () => {
-    const passwordHash = await passwordsOf(ctx).hash(password)
+    const passwordHash = await ctx.passwords.hash(password)
     await ctx.db.transaction(async (tx) => {
       // One statement decides whether the address is new, so that two people joining with it at once become one member.
       const [member] = await tx

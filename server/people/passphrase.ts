@@ -1,4 +1,4 @@
-export { READY_WORDS, readyPassphrase }
+export { readyPassphrase }
 
 import { randomInt } from 'node:crypto'
 import { PASSPHRASE_WORDS } from './passphrase-words.ts'

@@ -1,8 +1,7 @@
-export { HASHING, UNKNOWN_HASH, createPasswords, isWeaker, passwordsOf }
+export { UNKNOWN_HASH, createPasswords, isWeaker }
 export type { Passwords }
 
 import argon2 from 'argon2'
-import type { App } from '../context.ts'
 import { TooManyRequestsError } from '../errors.ts'
 
 /** OWASP Password Storage Cheat Sheet: argon2id with at least 19 MiB, two passes, one lane. */
@@ -29,6 +28,7 @@ interface Passwords {
   matches(stored: string | undefined | null, password: string): Promise<boolean>
 }
 
+/** The one queue of a running server: two at work, twenty waiting. */
 function createPasswords(): Passwords {
   let busy = 0
   const waiting: (() => void)[] = []
@@ -64,15 +64,4 @@ function createPasswords(): Passwords {
 /** Whether a hash was made with less work than we ask for today, and should be made anew at the next sign-in. */
 function isWeaker(stored: string): boolean {
   return !stored.startsWith('$argon2id$') || argon2.needsRehash(stored, HASHING)
-}
-
-const passwordsOfServer = new WeakMap<object, Passwords>()
-
-/** The one queue of a running server; it belongs to the server's database connection and goes with it. */
-function passwordsOf(app: Pick<App, 'connection'>): Passwords {
-  const known = passwordsOfServer.get(app.connection)
-  if (known !== undefined) return known
-  const fresh = createPasswords()
-  passwordsOfServer.set(app.connection, fresh)
-  return fresh
 }

@@ -1,5 +1,4 @@
-export { can, requirePermission, requireSignedIn, permissions }
-export type { Permission }
+export { can, requirePermission, requireSignedIn }
 
 import { ForbiddenError, NotFoundError, SignInRequiredError } from '../errors.ts'
 import type { Actor, SignedIn } from '../context.ts'
@@ -9,7 +8,8 @@ import { roleAtLeast } from '#shared/vocabulary/roles.ts'
 interface OwnedEdit {
   id: string
   authorId: string
-  state: string
+  /** When it was first sent for review; null while nobody but its writer has ever been meant to see it. */
+  sentAt: Date | null
 }
 
 /**
@@ -17,22 +17,20 @@ interface OwnedEdit {
  * here only to know what to offer.
  */
 const permissions = {
-  'guide.read': () => true,
   'edit.create': (actor: Actor) => isVerified(actor),
   'edit.read': (actor: Actor, edit: OwnedEdit) =>
-    isMember(actor) && (actor.id === edit.authorId || (isModerator(actor) && edit.state !== 'draft')),
+    isMember(actor) && (actor.id === edit.authorId || (isModerator(actor) && edit.sentAt !== null)),
   'edit.save': (actor: Actor, edit: OwnedEdit) => isVerified(actor) && actor.id === edit.authorId,
   'edit.send': (actor: Actor, edit: OwnedEdit) => isVerified(actor) && actor.id === edit.authorId,
   'edit.withdraw': (actor: Actor, edit: OwnedEdit) => isMember(actor) && actor.id === edit.authorId,
   'edit.decide': (actor: Actor, edit: OwnedEdit) => isModerator(actor) && actor.id !== edit.authorId,
   'edit.note': (actor: Actor, edit: OwnedEdit) =>
-    isMember(actor) && (actor.id === edit.authorId || (isModerator(actor) && edit.state !== 'draft')),
+    isMember(actor) && (actor.id === edit.authorId || (isModerator(actor) && edit.sentAt !== null)),
   'preview.render': (actor: Actor) => isVerified(actor),
   'queue.read': (actor: Actor) => isModerator(actor),
-  'adjustable.change': (actor: Actor) => isModerator(actor),
-  'audit.read': (actor: Actor) => isModerator(actor),
-  'member.list': (actor: Actor) => isMember(actor) && actor.role === 'admin',
-  'member.change_role': (actor: Actor) => isMember(actor) && actor.role === 'admin',
+  'member.list': (actor: Actor) => isAdmin(actor),
+  'member.change_role': (actor: Actor) => isAdmin(actor),
+  'member.suspend': (actor: Actor) => isAdmin(actor),
 } as const
 
 type Permission = keyof typeof permissions
@@ -52,7 +50,7 @@ function requirePermission<P extends Permission>(actor: Actor, permission: P, ..
   if (actor.kind === 'visitor') throw new SignInRequiredError(refusals[permission].toDo)
   const edit = subject[0] as OwnedEdit | undefined
   if (edit !== undefined && !can(actor, 'edit.read', edit)) throw new NotFoundError('edit', edit.id)
-  if (!actor.verified && isVerifiedPermission(permission)) {
+  if (!actor.verified && can({ ...actor, verified: true }, permission, ...subject)) {
     throw new ForbiddenError('Confirm your e-mail address first: open the link in the mail we sent you, or ask for a new one on your page.')
   }
   throw new ForbiddenError(refusals[permission].why)
@@ -62,12 +60,7 @@ function requireSignedIn(actor: Actor, toDo: string): asserts actor is SignedIn 
   if (actor.kind === 'visitor') throw new SignInRequiredError(toDo)
 }
 
-function isVerifiedPermission(permission: Permission): boolean {
-  return ['edit.create', 'edit.save', 'edit.send', 'preview.render'].includes(permission)
-}
-
 const refusals: Record<Permission, { toDo: string; why: string }> = {
-  'guide.read': { toDo: 'read this', why: 'You cannot read this.' },
   'edit.create': { toDo: 'write', why: 'You cannot write yet.' },
   'edit.read': { toDo: 'see this edit', why: 'Only its writer and the moderators can see this edit.' },
   'edit.save': { toDo: 'write', why: 'Only its writer can change this edit.' },
@@ -80,10 +73,9 @@ const refusals: Record<Permission, { toDo: string; why: string }> = {
   'edit.note': { toDo: 'write a note', why: 'Only its writer and the moderators can write notes on this edit.' },
   'preview.render': { toDo: 'see a preview', why: 'You cannot write yet.' },
   'queue.read': { toDo: 'open the review desk', why: 'The review desk is for moderators.' },
-  'adjustable.change': { toDo: 'change this', why: 'Moderators look after the adjustables.' },
-  'audit.read': { toDo: 'read the record', why: 'The record is for moderators.' },
   'member.list': { toDo: 'see the members', why: 'The list of members is for admins.' },
   'member.change_role': { toDo: 'change roles', why: 'Admins give out roles.' },
+  'member.suspend': { toDo: 'suspend members', why: 'Admins suspend members and sign them out.' },
 }
 
 function isMember(actor: Actor): actor is SignedIn {
@@ -96,4 +88,8 @@ function isVerified(actor: Actor): actor is SignedIn {
 
 function isModerator(actor: Actor): actor is SignedIn {
   return isVerified(actor) && roleAtLeast(actor.role, 'moderator')
+}
+
+function isAdmin(actor: Actor): actor is SignedIn {
+  return isVerified(actor) && actor.role === 'admin'
 }

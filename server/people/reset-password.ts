@@ -11,7 +11,6 @@ import { linkNoLongerWorks } from './link-problem.ts'
 import { resetPasswordMail } from './mails.ts'
 import { parseInput } from './parse-input.ts'
 import { requireGoodPassword } from './password-rules.ts'
-import { passwordsOf } from './passwords.ts'
 import { findToken, invalidateTokens, redeemToken } from './tokens.ts'
 
 /**
@@ -26,7 +25,7 @@ async function resetPassword(ctx: ServiceContext, input: unknown): Promise<void>
   const owner = await findToken(ctx.db, 'reset', token, ctx.clock())
   if (owner === undefined) throw linkNoLongerWorks('reset')
   requireGoodPassword(password, { ...owner, clubName: ctx.config.clubName })
-  const passwordHash = await passwordsOf(ctx).hash(password)
+  const passwordHash = await ctx.passwords.hash(password)
   await ctx.db.transaction(async (tx) => {
     const now = ctx.clock()
     const memberId = await redeemToken(tx, 'reset', token, now)
@@ -42,6 +41,7 @@ async function resetPassword(ctx: ServiceContext, input: unknown): Promise<void>
     await recordAudit({ ...ctx, db: tx }, { action: 'password.reset', ...byThemself(memberId) })
   })
   // Whoever was locked out by somebody else's guesses can sign in at once.
+  await ctx.rateLimits.reset('sign_in_guesser', `${owner.email.toLowerCase()} ${ctx.address}`)
   await ctx.rateLimits.reset('sign_in_account', owner.email.toLowerCase())
   await ctx.rateLimits.reset('sign_in_in_a_row', owner.email.toLowerCase())
 }

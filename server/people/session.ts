@@ -1,12 +1,15 @@
 export { actorFromSession, endSession, renewSession, sessionMiddleware, startSession }
 
-import connectPgSimple from 'connect-pg-simple'
 import { eq } from 'drizzle-orm'
 import type { Request, RequestHandler, Response } from 'express'
 import session from 'express-session'
 import { visitor, type Actor, type App } from '../context.ts'
 import { members } from '../db/schema/index.ts'
+import { AppError, SignInRequiredError } from '../errors.ts'
 import { describeDevice } from './device.ts'
+import type { Member } from './find-member.ts'
+import { sessionCookieName } from './session-cookie.ts'
+import { createSessionStore, insertSession, renameSession } from './session-store.ts'
 import type { MemberRole } from '#shared/vocabulary/roles.ts'
 
 declare module 'express-session' {
@@ -34,26 +37,15 @@ const LIFETIMES: Record<MemberRole, { idle: number; absolute: number }> = {
   admin: { idle: 2 * HOUR, absolute: 12 * HOUR },
 }
 
-/** Browsers refuse a `__Host-` cookie that is not Secure, or is meant for another path or domain. */
-function cookieName(app: Pick<App, 'config'>): string {
-  return app.config.secureCookies ? '__Host-cc' : 'cc'
-}
-
 /**
  * Sessions in PostgreSQL, by a cookie that only who has signed in ever gets. A session is written once, when it starts;
  * later requests only move its end on, so that a request under way cannot bring back a session that was ended meanwhile.
  */
 function sessionMiddleware(app: App): RequestHandler {
-  const Store = connectPgSimple(session)
   return session({
-    name: cookieName(app),
+    name: sessionCookieName(app.config.secureCookies),
     secret: app.config.sessionSecret,
-    store: new Store({
-      pool: app.connection.pool,
-      tableName: 'sessions',
-      createTableIfMissing: false,
-      errorLog: (...what: unknown[]) => app.log.error({ what }, 'sessions could not be tidied up'),
-    }),
+    store: createSessionStore(app),
     resave: false,
     saveUninitialized: false,
     rolling: true,
@@ -66,8 +58,10 @@ function sessionMiddleware(app: App): RequestHandler {
  * met as such at once, whatever their session says.
  */
 async function actorFromSession(app: App, req: Request): Promise<Actor> {
-  const { memberId, startedAt } = req.session
-  if (memberId === undefined) return visitor
+  // Some requests have no session at all, such as `OPTIONS *`, which is for no path.
+  const session = req.session as Request['session'] | undefined
+  if (session?.memberId === undefined) return visitor
+  const { memberId, startedAt } = session
   const [member] = await app.db
     .select({
       id: members.id,
@@ -93,31 +87,43 @@ async function actorFromSession(app: App, req: Request): Promise<Actor> {
   }
 }
 
-/** Begins a session under a new id, so that an id planted before signing in is worth nothing afterwards. */
-async function startSession(app: App, req: Request, member: { id: string; role: MemberRole }): Promise<void> {
+/**
+ * Begins a session under a new id, so that an id planted before signing in is worth nothing afterwards.
+ * @param member as they were when the password was compared
+ * @throws AppError `sign_in_failed` (401) when the password was changed or the member suspended since then
+ */
+async function startSession(app: App, req: Request, member: Member): Promise<void> {
   await regenerate(req)
   req.session.memberId = member.id
   req.session.startedAt = app.clock().getTime()
   req.session.device = describeDevice(req.get('user-agent'))
   req.session.cookie.maxAge = LIFETIMES[member.role].idle
   // Before the answer: a browser that follows a redirect is often faster than the end of this request.
-  await save(req)
+  if (await insertSession(app, req, member)) return
+  await destroy(req)
+  throw new AppError('sign_in_failed', 401, 'Your password or your membership changed at this very moment. Sign in again.')
 }
 
-/** Goes on with this session under a new id. */
-async function renewSession(req: Request): Promise<void> {
+/**
+ * Goes on with this session under a new id.
+ * @throws SignInRequiredError (401) when it was ended meanwhile
+ */
+async function renewSession(app: App, req: Request): Promise<void> {
   const { memberId, startedAt, device, cookie } = req.session
   const idle = cookie.originalMaxAge
-  await regenerate(req)
+  const before = req.sessionID
+  req.sessionStore.generate(req)
   Object.assign(req.session, { memberId, startedAt, device })
   req.session.cookie.maxAge = idle ?? LIFETIMES.member.idle
-  await save(req)
+  if (await renameSession(app, before, req.sessionID)) return
+  await destroy(req)
+  throw new SignInRequiredError('go on')
 }
 
 /** Deletes the session and its cookie, and has the browser forget pages it kept for this person. */
 async function endSession(app: App, req: Request, res: Response): Promise<void> {
   await destroy(req)
-  res.clearCookie(cookieName(app), { path: '/', httpOnly: true, sameSite: 'lax', secure: app.config.secureCookies })
+  res.clearCookie(sessionCookieName(app.config.secureCookies), { path: '/', httpOnly: true, sameSite: 'lax', secure: app.config.secureCookies })
   // Not "storage": what the reader keeps on this device without signing in (the sheet, their car) stays theirs.
   res.setHeader('Clear-Site-Data', '"cache"')
 }
@@ -125,12 +131,6 @@ async function endSession(app: App, req: Request, res: Response): Promise<void> 
 function regenerate(req: Request): Promise<void> {
   return new Promise((resolve, reject) => {
     req.sessionStore.regenerate(req, (error: unknown) => (error ? reject(error as Error) : resolve()))
-  })
-}
-
-function save(req: Request): Promise<void> {
-  return new Promise((resolve, reject) => {
-    req.session.save((error: unknown) => (error ? reject(error as Error) : resolve()))
   })
 }
 

@@ -1,4 +1,4 @@
-export { TOKEN_MINUTES, findToken, invalidateTokens, issueToken, redeemToken, hashOfSecret }
+export { TOKEN_MINUTES, findToken, invalidateTokens, issueToken, redeemToken }
 export type { TokenPurpose }
 
 import { createHash, randomBytes } from 'node:crypto'

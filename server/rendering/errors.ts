@@ -7,7 +7,8 @@ type RefusalCode = 'too_long' | 'too_deep' | 'too_many_tokens' | 'too_heavy' | '
 
 /**
  * The text was not rendered at all, and the message says what to do about it. All codes are about the text
- * (422) but `busy` (503): too many texts were waiting already, and the same text will pass a little later.
+ * (422) but `busy` (503): too many texts, or too many of the same member's, were waiting already, and the same text will
+ * pass a little later.
  */
 class RenderRefusedError extends AppError {
   declare readonly code: RefusalCode

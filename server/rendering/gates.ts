@@ -1,4 +1,4 @@
-export { LIMITS, assertLength, assertMarkup, assertTokens, measureMarkup }
+export { assertLength, assertMarkup, assertTokens, measureMarkup }
 
 import type { Token } from 'markdown-it'
 import { RenderRefusedError } from './errors.ts'

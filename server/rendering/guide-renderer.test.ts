@@ -65,6 +65,31 @@ test('texts wait their turn up to a limit, then they are turned away; a thread i
   expect(threads).toHaveLength(2)
 })
 
+test('one member has two texts in hand at most, and others are served meanwhile', async () => {
+  const { render } = start()
+  const own = ['a', 'b'].map((text) => render(text, { owner: 'priya' }))
+  await expect(render('c', { owner: 'priya' })).rejects.toMatchObject({ code: 'busy', status: 503, message: expect.stringContaining('Your last preview') })
+  expect((await render('d', { owner: 'tomasz' })).plainText).toBe('d')
+  await Promise.all(own)
+  expect((await render('e', { owner: 'priya' })).plainText).toBe('e')
+})
+
+test('a refused text counts no longer against its owner', async () => {
+  const { render } = start()
+  for (let n = 0; n < 3; n++) await expect(render('> '.repeat(50), { owner: 'priya' })).rejects.toMatchObject({ code: 'too_deep' })
+  expect((await render('a', { owner: 'priya' })).plainText).toBe('a')
+})
+
+test('what is urgent goes before previews, in its own order, and finds room when they fill the queue', async () => {
+  const { render } = start({ maxWaiting: 2 })
+  const done: string[] = []
+  const follow = (text: string, urgent: boolean) => render(text, { urgent }).then(() => done.push(text))
+  const all = [follow('under way', false), follow('preview 1', false), follow('preview 2', false), follow('sent 1', true), follow('sent 2', true)]
+  await expect(render('preview 3')).rejects.toMatchObject({ code: 'busy' })
+  await Promise.all(all)
+  expect(done).toEqual(['under way', 'sent 1', 'sent 2', 'preview 1', 'preview 2'])
+})
+
 test('a thread that dies takes only its own text with it, and is not missed when idle', async () => {
   const { render } = start()
   await render('a')

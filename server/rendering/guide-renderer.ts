@@ -1,5 +1,5 @@
 export { createGuideRenderer }
-export type { GuideRenderer, GuideRendererOptions }
+export type { GuideRenderer, GuideRendererOptions, RenderOrder }
 
 import { RenderRefusedError } from './errors.ts'
 import { RenderThread } from './render-thread.ts'
@@ -17,10 +17,20 @@ interface GuideRendererOptions {
   timeoutMs?: number
   /** @default 1 */
   threads?: number
-  /** Texts that may wait before others are turned away. @default 50 */
+  /** Texts that may wait before others are turned away, urgent and other ones each. @default 50 */
   maxWaiting?: number
+  /** Texts of one owner that may wait or be under way. @default 2 */
+  maxOfOneOwner?: number
   /** Texts after which a thread is replaced: a DOM that lives long grows. @default 200 */
   rendersPerThread?: number
+}
+
+/** Whose text it is and how soon it is needed, so that nobody's previews keep others waiting. */
+interface RenderOrder {
+  /** The member it is laid out for. Without one it is not counted. */
+  owner?: string
+  /** Before all that is not: something is sent or published with it. */
+  urgent?: boolean
 }
 
 interface GuideRenderer {
@@ -29,14 +39,14 @@ interface GuideRenderer {
    *
    * @throws RenderRefusedError too_long, too_deep, too_many_tokens, too_heavy, timed_out: the text must
    *   change;
-   *   busy: try again later
+   *   busy: try again later, when fewer texts wait or the owner's own are done
    */
-  render(markdown: string): Promise<RenderResult>
+  render(markdown: string, order?: RenderOrder): Promise<RenderResult>
   /** Stops the threads; what still waits is rejected. */
   close(): Promise<void>
 }
 
-interface Waiting {
+interface Waiting extends RenderOrder {
   markdown: string
   resolve(result: RenderResult): void
   reject(error: unknown): void
@@ -47,10 +57,11 @@ interface Waiting {
  * the server. The first thread starts at once, so that the first text does not wait for a DOM to load.
  */
 function createGuideRenderer(options: GuideRendererOptions): GuideRenderer {
-  const { vocabulary, timeoutMs = 2_000, threads = 1, maxWaiting = 50, rendersPerThread = 200 } = options
+  const { vocabulary, timeoutMs = 2_000, threads = 1, maxWaiting = 50, maxOfOneOwner = 2, rendersPerThread = 200 } = options
   const waiting: Waiting[] = []
   const idle: RenderThread[] = [startThread()]
   const all = new Set(idle)
+  const underWay = new Set<Waiting>()
   let closed = false
 
   function startThread(): RenderThread {
@@ -86,6 +97,7 @@ function createGuideRenderer(options: GuideRendererOptions): GuideRenderer {
 
   async function serve(job: Waiting, thread: RenderThread): Promise<void> {
     thread.keepProcessAlive(true)
+    underWay.add(job)
     try {
       const current = typeof vocabulary === 'function' ? await vocabulary() : vocabulary
       await thread.ready
@@ -93,6 +105,7 @@ function createGuideRenderer(options: GuideRendererOptions): GuideRenderer {
     } catch (error) {
       job.reject(error)
     } finally {
+      underWay.delete(job)
       giveBack(thread)
       serveNext()
     }
@@ -106,17 +119,26 @@ function createGuideRenderer(options: GuideRendererOptions): GuideRenderer {
     }
   }
 
+  /** Why a text has to come back later, or null. */
+  function busyWith({ owner, urgent = false }: RenderOrder): string | null {
+    const own = owner === undefined ? 0 : [...waiting, ...underWay].filter((job) => job.owner === owner).length
+    if (own >= maxOfOneOwner) return 'Your last preview is still being made. Your text is unchanged: try again in a few seconds.'
+    const alike = waiting.filter((job) => (job.urgent ?? false) === urgent).length
+    return alike < maxWaiting ? null : 'Many texts are being laid out just now. Yours is unchanged: try again in a few seconds.'
+  }
+
+  function queue(job: Waiting): void {
+    const firstOther = job.urgent === true ? waiting.findIndex((other) => other.urgent !== true) : -1
+    waiting.splice(firstOther < 0 ? waiting.length : firstOther, 0, job)
+  }
+
   return {
-    render(markdown) {
+    render(markdown, order = {}) {
       return new Promise((resolve, reject) => {
         if (closed) return reject(new Error('The renderer is closed.'))
-        if (waiting.length >= maxWaiting) {
-          return reject(new RenderRefusedError(
-            'busy',
-            'Many texts are being laid out just now. Yours is unchanged: try again in a few seconds.'),
-          )
-        }
-        waiting.push({ markdown, resolve, reject })
+        const busy = busyWith(order)
+        if (busy !== null) return reject(new RenderRefusedError('busy', busy))
+        queue({ ...order, markdown, resolve, reject })
         serveNext()
       })
     },

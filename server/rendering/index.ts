@@ -1,12 +1,9 @@
-// The door: what the rest of the server may use of rendering. Pages that only lay out stored HTML import
-// split-parts.ts.
+// The door: what the rest of the server may use of rendering. The parts of a body and how it is split stand in
+// shared/rendering, where pages that only lay out stored HTML use them too.
 export { RenderRefusedError } from './errors.ts'
 export type { RefusalCode } from './errors.ts'
+export { holdsBack } from './holding-problems.ts'
 export { createGuideRenderer } from './guide-renderer.ts'
-export type { GuideRenderer, GuideRendererOptions } from './guide-renderer.ts'
-export { partPlaceholder, splitParts } from './split-parts.ts'
-export type {
-  BodySegment, CalculatorPart, CalculatorVocabulary, EffectsPart, Heading, RenderedPart, RenderProblem, RenderResult,
-  RenderVocabulary, WorkedPart,
-} from './types.ts'
+export type { GuideRenderer, GuideRendererOptions, RenderOrder } from './guide-renderer.ts'
+export type { CalculatorVocabulary, Heading, RenderProblem, RenderResult, RenderVocabulary } from './types.ts'
 export { RENDERER_VERSION } from './version.ts'

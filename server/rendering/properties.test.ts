@@ -5,7 +5,7 @@ import { isAppError } from '../errors.ts'
 import { vocabulary } from './fixtures/vocabulary.ts'
 import { createBodyRenderer } from './render-body.ts'
 import { createSanitiser } from './sanitise.ts'
-import { partPlaceholder, splitParts } from './split-parts.ts'
+import { partPlaceholder, splitParts } from '#shared/rendering/split-parts.ts'
 import type { RenderResult } from './types.ts'
 
 const render = createBodyRenderer()

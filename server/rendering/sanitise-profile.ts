@@ -1,6 +1,6 @@
 export { ALLOWED_ELEMENTS, SAFE_ADDRESS }
 
-import { PART_KINDS } from './split-parts.ts'
+import { PART_KINDS } from '#shared/rendering/split-parts.ts'
 
 /** What an attribute's whole value must match. */
 type AllowedAttributes = Record<string, RegExp>

@@ -1,7 +1,6 @@
-export type {
-  BodySegment, CalculatorPart, CalculatorVocabulary, EffectsPart, Heading, RenderedPart, RenderProblem, RenderResult,
-  RenderVocabulary, WorkedPart,
-}
+export type { CalculatorVocabulary, Heading, RenderProblem, RenderResult, RenderVocabulary }
+
+import type { RenderedPart } from '#shared/rendering/parts.ts'
 
 /** What the renderer has to know of one calculator to check the numbers a guide gives it. */
 interface CalculatorVocabulary {
@@ -37,41 +36,8 @@ interface Heading {
   text: string
 }
 
-/** A calculator with the writer's starting values, in the unit of each input. */
-interface CalculatorPart {
-  n: number
-  kind: 'calculator'
-  slug: string
-  preset: Record<string, number>
-}
-
-/** The lap line of one adjustable. */
-interface EffectsPart {
-  n: number
-  kind: 'effects'
-  adjustable: string
-}
-
-/**
- * A worked example: the run, the answer the writer expects, and how far off it may be as a fraction (0.01 =
- * 1 %).
- */
-interface WorkedPart {
-  n: number
-  kind: 'worked'
-  slug: string
-  inputs: Record<string, number>
-  expect: { key: string; value: number }
-  tolerance: number
-}
-
-type RenderedPart = CalculatorPart | EffectsPart | WorkedPart
-
-/** A body in reading order: stretches of complete HTML with the parts between them. */
-type BodySegment = { kind: 'html'; html: string } | RenderedPart
-
 interface RenderResult {
-  /** Sanitised HTML with one empty placeholder for each part (see split-parts.ts). */
+  /** Sanitised HTML with one empty placeholder for each part (see shared/rendering/split-parts.ts). */
   html: string
   parts: RenderedPart[]
   headings: Heading[]

@@ -66,7 +66,9 @@ async function seedShelves(db: Database, content: BookContent): Promise<void> {
     )
     .onConflictDoNothing()
   await db.insert(glossaryTerms).values(content.glossary).onConflictDoNothing()
-  await db.insert(wantedGuides).values(content.wanted).onConflictDoNothing()
+  // Only into a new book: a wish that is missing later was granted, and must not come back at the next start.
+  const [guide] = await db.select({ id: guides.id }).from(guides).limit(1)
+  if (guide === undefined) await db.insert(wantedGuides).values(content.wanted).onConflictDoNothing()
 }
 
 /** The writers of the book, named but without a way to sign in. */

@@ -18,6 +18,7 @@ import type { MathNode } from './mathml.ts'
 import type { PlotSpec } from './plot.ts'
 import type { Figure, Sentence } from './sentence.ts'
 import type { UnitId } from '#shared/units/units.ts'
+import type { CautionKind } from '#shared/vocabulary/cautions.ts'
 
 type CalculatorPart =
   | 'tyres'
@@ -115,7 +116,7 @@ interface CalculatorSource {
 }
 
 interface CalculatorCaution {
-  kind: 'lithium' | 'spinning' | 'heat' | 'solvent' | 'soldering' | 'cutting' | 'eyes'
+  kind: CautionKind
   title: string
   /** What to do, in one sentence. */
   order: string

@@ -1,4 +1,4 @@
-export { splitBlocks, headingOf }
+export { headingOf, linesOf, splitBlocks }
 
 /**
  * Splits Markdown into paragraphs, each with the blank lines after it, so that the blocks joined give the text again.
@@ -8,7 +8,7 @@ function splitBlocks(text: string): string[] {
   const blocks: string[] = []
   let block = ''
   let ended = false
-  for (const line of text.match(/[^\n]*\n|[^\n]+$/g) ?? []) {
+  for (const line of linesOf(text)) {
     const blank = line.trim() === ''
     if (ended && !blank) {
       blocks.push(block)
@@ -21,8 +21,24 @@ function splitBlocks(text: string): string[] {
   return blocks
 }
 
-/** The words of a heading block such as `## How it works`, or null for any other block. */
+/** Lines with their line ends, so that joining them gives the text again. */
+function linesOf(text: string): string[] {
+  return text.match(/[^\n]*\n|[^\n]+$/g) ?? []
+}
+
+/** The words of a heading block such as `## How it works`, or null for any other block and for a heading without words. */
 function headingOf(block: string): string | null {
-  const match = /^ {0,3}#{1,6}[ \t]+([^\n]+)/.exec(block)
-  return match?.[1]?.replace(/[ \t]+#*[ \t]*$/, '').trim() ?? null
+  const end = block.indexOf('\n')
+  const line = end < 0 ? block : block.slice(0, end)
+  const opening = /^ {0,3}#{1,6}[ \t]/.exec(line)
+  if (opening === null) return null
+  return withoutClosingMarks(line.slice(opening[0].length).trim()) || null
+}
+
+/** Takes off the `#` that may close a heading behind a blank. By hand: a pattern would try every run of blanks anew. */
+function withoutClosingMarks(words: string): string {
+  let end = words.length
+  while (words[end - 1] === '#') end -= 1
+  const closed = end === 0 || words[end - 1] === ' ' || words[end - 1] === '\t'
+  return closed ? words.slice(0, end).trimEnd() : words
 }

@@ -9,6 +9,7 @@ import { compareWords, wordCount, type Segment } from './segments.ts'
 /**
  * One stretch of a body. A run of unchanged paragraphs is one `same` entry with its size, so that it can be folded away;
  * every other entry is one paragraph under the heading it stands under in the new text (in the old one when removed).
+ * The blank lines after a paragraph do not make it another: a `same` entry has them as the new text has them.
  */
 type BodyChange =
   | { kind: 'same'; text: string; blocks: number; words: number }
@@ -22,7 +23,7 @@ const WORD_EFFORT = 250_000
 function compareBodies(before: string, after: string): BodyChange[] {
   const oldBlocks = splitBlocks(before)
   const newBlocks = splitBlocks(after)
-  const runs = diffArrays(oldBlocks, newBlocks, { maxEditLength: MAX_CHANGED_BLOCKS })
+  const runs = diffArrays(oldBlocks.map(withoutEnd), newBlocks.map(withoutEnd), { maxEditLength: MAX_CHANGED_BLOCKS })
   if (runs === undefined) return rewrittenBody(before, after)
 
   const changes: BodyChange[] = []
@@ -46,18 +47,27 @@ function compareBodies(before: string, after: string): BodyChange[] {
     added = []
   }
 
-  for (const run of runs) {
-    if (run.removed) removed.push(...run.value)
-    else if (run.added) added.push(...run.value)
+  let oldAt = 0
+  let newAt = 0
+  for (const { value: { length }, removed: isRemoved, added: isAdded } of runs) {
+    if (isRemoved) removed.push(...oldBlocks.slice(oldAt, oldAt + length))
+    else if (isAdded) added.push(...newBlocks.slice(newAt, newAt + length))
     else {
       flush()
-      const text = run.value.join('')
-      changes.push({ kind: 'same', text, blocks: run.value.length, words: wordCount(text) })
-      for (const block of run.value) heading = headingOf(block) ?? heading
+      const blocks = newBlocks.slice(newAt, newAt + length)
+      const text = blocks.join('')
+      changes.push({ kind: 'same', text, blocks: length, words: wordCount(text) })
+      for (const block of blocks) heading = headingOf(block) ?? heading
     }
+    if (!isAdded) oldAt += length
+    if (!isRemoved) newAt += length
   }
   flush()
   return changes
+}
+
+function withoutEnd(block: string): string {
+  return block.trimEnd()
 }
 
 // The word comparison takes time with the square of the words that differ.

@@ -1,5 +1,5 @@
-export { compareGuides, countsOf }
-export type { ChangeSizes, FieldChange, GuideComparison }
+export { compareGuides, noChanges }
+export type { ChangeSizes, GuideComparison }
 
 import type { GuideDraft } from '../schemas/guide-content.ts'
 import { compareBodies, type BodyChange } from './compare-bodies.ts'
@@ -24,6 +24,8 @@ interface ChangeSizes {
   pictures: number
   sources: number
 }
+
+const noChanges: ChangeSizes = { words: 0, fields: 0, effects: 0, calculators: 0, pictures: 0, sources: 0 }
 
 interface GuideComparison {
   /** Short fields that differ. */

@@ -1,5 +1,4 @@
 export { changeRows, rowAction }
-export type { RowAction }
 
 import type { FormFields } from './form-fields.ts'
 

@@ -1,5 +1,4 @@
 export { guideTextFields }
-export type { GuideTextField }
 
 import type { GuideDraft } from '../schemas/guide-content.ts'
 

@@ -108,6 +108,24 @@ describe('mergeGuides', () => {
     const { conflicts } = mergeGuides({ ...base, body: body('a') }, { ...base, body: body('b') }, { ...base, body: body('c') })
     expect(conflicts).toMatchObject([{ field: 'body', mine: body('b'), theirs: body('c') }])
   })
+
+  it.each([
+    ['1,900 equal lines', (side: string) => `${side}\n${'- the same again\n'.repeat(1_900)}${side}\n`],
+    ['a heading of 64 KiB of blanks', (side: string) => `${side}\n\n## a${' \t'.repeat(32_000)}${side}\n\n`],
+  ])('merges in bounded time and loses neither side: %s', (_name, body) => {
+    const start = process.cpuUsage()
+    const { conflicts } = mergeGuides({ ...base, body: body('o') }, { ...base, body: body('a') }, { ...base, body: body('b') })
+    // Without its bounds either takes many seconds; the aim is a few milliseconds.
+    expect(process.cpuUsage(start).user / 1000).toBeLessThan(600)
+    expect(conflicts.map((one) => one.mine).join('')).toContain('a\n')
+    expect(conflicts.map((one) => one.theirs).join('')).toContain('b\n')
+  })
+
+  it('goes into lines however long the common start and end are', () => {
+    const body = (side: string) => `${'- the same again\n'.repeat(1_900)}${side}\n${'- the same again\n'.repeat(1_900)}`
+    const { conflicts } = mergeGuides({ ...base, body: body('o') }, { ...base, body: body('a') }, { ...base, body: body('b') })
+    expect(conflicts).toEqual([{ field: 'body', label: 'Body', base: 'o\n', mine: 'a\n', theirs: 'b\n' }])
+  })
 })
 
 /** Every text of a guide that a person typed; the body by lines. */

@@ -1,5 +1,5 @@
 export { mergeGuides }
-export type { GuideMerge, MergeConflict }
+export type { MergeConflict }
 
 import type { GuideDraft, Source } from '../schemas/guide-content.ts'
 import { sourceKinds } from '../vocabulary/source-kinds.ts'

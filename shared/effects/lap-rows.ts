@@ -6,6 +6,7 @@ import { strengths, type Basis, type Change, type Direction, type Strength } fro
 import { PHASES, type Phase } from '../vocabulary/phases.ts'
 import { QUALITIES, qualities, type Quality } from '../vocabulary/qualities.ts'
 import { stepWords } from './step-words.ts'
+import { withOpposites } from './with-opposites.ts'
 
 /** An effect as the lap line needs it; a row of the database or of a guide's content fits. */
 interface LapEffect {
@@ -82,9 +83,7 @@ interface LapRow {
 const LEADS = 2
 
 /**
- * The rows of an effects table, in the order in which the effects name their adjustables, `up` before `down`. An effect
- * that mirrors also counts, with the opposite change, for the opposite direction, unless that direction has an effect of
- * its own for the same part of the lap and quality (the rule of by feel). Every row has all six cells: that nothing
+ * The rows of an effects table, in the order in which the effects name their adjustables, `up` before `down`. Every row has all six cells: that nothing
  * changes is knowledge too.
  */
 function buildLapRows(effects: readonly LapEffect[], adjustables: readonly AdjustableWords[]): LapRow[] {
@@ -107,11 +106,9 @@ function buildRow(
   key: string,
   alone: boolean,
 ): LapRow | null {
-  const direct = effects.filter((effect) => effect.direction === direction)
-  const mirrored = effects
-    .filter((effect) => effect.direction !== direction && effect.mirrors && !direct.some((own) => samePlace(own, effect)))
-    .map(opposite)
-  const all = [...direct, ...mirrored]
+  const moved = withOpposites(effects).filter((each) => each.direction === direction)
+  // What a note explains holds the way it was written.
+  const all = moved.map(({ effect, change, mirrored }) => (mirrored ? { ...effect, direction, change, note: '' } : effect))
   if (all.length === 0) return null
   const way = words === undefined ? direction : words[direction]
   return {
@@ -120,23 +117,9 @@ function buildRow(
     direction,
     name: alone ? capital(way) : `${words?.name ?? key}: ${way}`,
     size: words === undefined ? '' : stepWords(words),
-    mirrored: direct.length === 0,
+    mirrored: moved.every(({ mirrored }) => mirrored),
     bases: [...new Set(all.map((effect) => effect.basis))],
     cells: PHASES.map((phase) => buildCell(phase, all.filter((effect) => effect.phase === phase))),
-  }
-}
-
-function samePlace(one: LapEffect, other: LapEffect): boolean {
-  return one.phase === other.phase && one.quality === other.quality
-}
-
-function opposite(effect: LapEffect): LapEffect {
-  return {
-    ...effect,
-    direction: effect.direction === 'up' ? 'down' : 'up',
-    change: effect.change === 'more' ? 'less' : 'more',
-    // What a note explains holds the way it was written.
-    note: '',
   }
 }
 

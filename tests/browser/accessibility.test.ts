@@ -31,7 +31,7 @@ beforeAll(async () => {
   const desk = await (await app.signedIn('imre')).get('/api/edits?state=in_review&whose=everyone').expect(200)
   editOf = {
     tomasz: (draft.body as { id: string }).id,
-    imre: (desk.body as { edits: { id: string }[] }).edits[0]!.id,
+    imre: (desk.body as { id: string }[])[0]!.id,
   }
 })
 afterAll(() => Promise.all([chromium.close(), app.stop()]))

@@ -49,7 +49,7 @@ describe.each(WIDTHS)('the main job at %i px', (width) => {
     const address = new URL(writer.page.url()).pathname
     const body = writer.page.getByLabel('Your words')
     await body.fill(`${await body.inputValue()}\n\n${sentence}\n`)
-    await writer.page.getByLabel('In short').fill('Oil and piston set how fast the shock may move: thicker oil or smaller holes slow it down.')
+    await writer.page.getByRole('textbox', { name: 'In short' }).fill('Oil and piston set how fast the shock may move: thicker oil or smaller holes slow it down.')
     await writer.page.getByRole('button', { name: 'Keep as a draft' }).click()
     await writer.page.getByText(/Saved/).first().waitFor()
     await writer.page.goto(address)

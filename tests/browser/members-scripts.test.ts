@@ -1,6 +1,8 @@
 import { afterAll, beforeAll, expect, it } from 'vitest'
 import { openBrowser, type Visit } from '../support/browser.ts'
 import { createTestApp, DEMO_PASSWORDS, type TestApp } from '../support/test-app.ts'
+import { holdsBack } from '#server/rendering/index.ts'
+import { GuideDraft } from '#shared/schemas/guide-content.ts'
 import { xssPayloads } from '../security/xss-payloads.ts'
 
 /**
@@ -14,10 +16,8 @@ beforeAll(async () => {
 })
 afterAll(() => Promise.all([chromium.close(), app.stop()]))
 
-const PER_GUIDE = 45
-const groups = Array.from({ length: Math.ceil(xssPayloads.length / PER_GUIDE) }, (_, n) =>
-  xssPayloads.slice(n * PER_GUIDE, (n + 1) * PER_GUIDE),
-)
+// A member may send ten edits an hour.
+const PER_GUIDE = 60
 
 it('the same payloads do fire when a page prints them raw, so silence means something', async () => {
   const { page, close } = await chromium.visit('about:blank')
@@ -43,10 +43,11 @@ it('runs none of them for a reader, a writer or a moderator', async () => {
   const writing = await watched(await chromium.visit(app.url), fired)
   await writing.context.request.post('/api/session', { data: DEMO_PASSWORDS.priya! })
 
-  const base = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
-  let edit = base
+  const printable = await printablePayloads()
+  expect(printable.length).toBeGreaterThan(xssPayloads.length * 0.8)
+  const groups = Array.from({ length: Math.ceil(printable.length / PER_GUIDE) }, (_, n) => printable.slice(n * PER_GUIDE, (n + 1) * PER_GUIDE))
   for (const [n, payloads] of groups.entries()) {
-    if (n > 0) edit = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
+    const edit = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
     const hostile = oneLine(payloads[n % payloads.length]!)
     const content = {
       ...edit.content,
@@ -71,8 +72,30 @@ it('runs none of them for a reader, a writer or a moderator', async () => {
     await pokeEverything(reading)
     expect(fired).toEqual([])
   }
+  // What cannot be printed, because a part it asks for does not exist, can still be kept as a draft and looked at.
+  const rest = xssPayloads.filter((text) => !printable.includes(text) && GuideDraft.safeParse({ body: text }).success)
+  const draft = (await writer.post('/api/edits').send({ guideSlug: 'rear-toe' }).expect(201)).body as EditBody
+  for (const payloads of [rest.slice(0, rest.length / 2), rest.slice(rest.length / 2)]) {
+    const newest = (await writer.get(`/api/edits/${draft.id}`).expect(200)).body as EditBody
+    await writer
+      .put(`/api/edits/${draft.id}`)
+      .set('If-Match', `"${newest.version}"`)
+      .send({ content: { ...newest.content, body: payloads.join('\n\n') }, summary: '' })
+      .expect(200)
+    await writing.page.goto(`/write/${draft.id}`, { waitUntil: 'networkidle' })
+    expect(fired).toEqual([])
+  }
   for (const visit of [reading, judging, writing]) await visit.close()
 })
+
+async function printablePayloads(): Promise<string[]> {
+  const printable: string[] = []
+  for (const payload of xssPayloads.filter((text) => GuideDraft.safeParse({ body: text }).success)) {
+    const rendered = await app.app.renderer.render(payload).catch(() => null)
+    if (rendered !== null && !rendered.problems.some(holdsBack)) printable.push(payload)
+  }
+  return printable
+}
 
 interface EditBody {
   id: string

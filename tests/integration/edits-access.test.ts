@@ -40,6 +40,27 @@ describe('another person’s draft', () => {
   })
 })
 
+describe('a withdrawn edit', () => {
+  const everyone = async () => ((await people.odile.get('/api/edits?state=withdrawn').expect(200)).body as EditView[]).map((edit) => edit.id)
+
+  it('that was never sent stays hidden from moderators', async () => {
+    const draft = await beginEdit(people.priya, { chapter: 'C' })
+    const withdrawn = (await people.priya.post(`/api/edits/${draft.id}/withdraw`).set(...ifMatch(draft)).send({}).expect(200)).body as EditView
+    await people.odile.get(`/api/edits/${draft.id}`).expect(404)
+    await people.odile.post(`/api/edits/${draft.id}/decline`).set(...ifMatch(withdrawn)).send({ reason: 'A reason' }).expect(404)
+    await people.odile.post(`/api/edits/${draft.id}/notes`).send({ text: 'A note' }).expect(404)
+    expect(await everyone()).not.toContain(draft.id)
+    await people.priya.get(`/api/edits/${draft.id}`).expect(200)
+  })
+
+  it('that was sent before stays readable to moderators', async () => {
+    const sent = await sentEdit(people.priya, { guideSlug: 'anti-squat' }, { title: 'Anti-squat, again' })
+    await people.priya.post(`/api/edits/${sent.id}/withdraw`).set(...ifMatch(sent)).send({}).expect(200)
+    await people.odile.get(`/api/edits/${sent.id}`).expect(200)
+    expect(await everyone()).toContain(sent.id)
+  })
+})
+
 describe('an edit in review', () => {
   it('is hidden from other members and asks visitors to sign in', async () => {
     const sent = await sentEdit(people.priya, { guideSlug: 'droop' }, { title: 'Droop, measured' })

@@ -57,10 +57,17 @@ describe('what cannot be sent says so at each field and loses nothing', () => {
     expect(answer.body.errors.map((problem: { field: string }) => problem.field).sort()).toEqual(['content.body', 'content.inShort', 'content.title'])
   })
 
+  it('does not hold back a text over what is only noticed: it is printed as it was written', async () => {
+    const saved = await saveEdit(priya, await beginEdit(priya, { chapter: 'A' }), { ...WHOLE_GUIDE, title: 'Oddly marked', body: '# High\n\n:::nothing\nWords.\n:::\n' }, 'Fine summary')
+    const preview = (await priya.post('/api/preview').send({ content: saved.content }).expect(200)).body
+    expect(preview.problems.map(({ holds }: { holds: boolean }) => holds)).toEqual([false, false])
+    await priya.post(`/api/edits/${saved.id}/send`).set('If-Match', `"${saved.version}"`).send({}).expect(200)
+  })
+
   it.each([
     ['summary', {}, '', 'summary'],
     ['adjustable', { effects: [{ ...WHOLE_GUIDE.effects[0]!, adjustable: 'flux_capacitor' }] }, 'Fine summary', 'content.effects.0.adjustable'],
-    ['unknown directive', { body: 'Text.\n\n::calculator{slug=no-such-calculator}\n' }, 'Fine summary', 'content.body'],
+    ['unknown calculator', { body: 'Text.\n\n::calculator{slug=no-such-calculator}\n' }, 'Fine summary', 'content.body'],
     ['worked example', { body: '::worked{calculator=fluid-blend lowViscosity=5000 highViscosity=10000 targetViscosity=7000 totalVolume=10 expect=highVolume:9 tolerance=1%}\n' }, 'Fine summary', 'content.body'],
     ['too deep', { body: `${'> '.repeat(200)}deep` }, 'Fine summary', 'content.body'],
   ])('%s', async (_name, change, summary, field) => {

@@ -31,7 +31,7 @@ async function act(edit: EditView, action: EditAction) {
 }
 
 const waysTo: Record<EditState, EditAction[]> = {
-  draft: [], in_review: ['send'], changes_asked: ['send', 'ask'], approved: ['send', 'approve'], declined: ['send', 'decline'], withdrawn: ['withdraw'],
+  draft: [], in_review: ['send'], changes_asked: ['send', 'ask'], approved: ['send', 'approve'], declined: ['send', 'decline'], withdrawn: ['send', 'withdraw'],
 }
 
 /** An edit brought into a state over HTTP. */

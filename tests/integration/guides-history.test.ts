@@ -45,6 +45,14 @@ describe('a guide that was changed twice and had one edit declined', () => {
     expect(layers[2]).toMatchObject({ changes: { fields: 1, effects: 0 } })
   })
 
+  it('shows no sizes for an edition from before they were kept', async () => {
+    await rows(app, 'alter table editions disable trigger editions_never_changed')
+    await rows(app, `update editions set changes = '{}' where guide_id = (select id from guides where slug = 'anti-squat')`)
+    await rows(app, 'alter table editions enable trigger editions_never_changed')
+    const history = await getHistory(ctx, { slug: 'anti-squat' })
+    expect(history).toMatchObject({ layers: [{ number: 1, changes: { words: 0, fields: 0, effects: 0, calculators: 0, pictures: 0, sources: 0 } }] })
+  })
+
   it('keeps every edition readable as it was', async () => {
     expect(await getEdition(ctx, { slug: 'rear-toe', number: 1 })).toMatchObject({ title: first.title, edition: 1, isPublished: false, publishedEdition: 3 })
     expect(await getEdition(ctx, { slug: 'rear-toe', number: 3 })).toMatchObject({ title: 'Rear toe-in', isPublished: true })
@@ -98,7 +106,7 @@ describe('a guide that was changed twice and had one edit declined', () => {
 describe('what was published', () => {
   const changes = [
     `update editions set content = jsonb_set(content, '{title}', '"Other"')`, `update editions set number = number + 100`,
-    `update editions set author_id = approver_id`, `update editions set summary = 'x y z'`, `update editions set renderer_version = 0`,
+    `update editions set author_id = approver_id`, `update editions set summary = 'x y z'`, `update editions set changes = '{}'`, `update editions set renderer_version = 0`,
     'delete from editions', 'truncate editions cascade', `update audit_entries set action = 'edit.other'`, 'delete from audit_entries',
   ]
   it.each(changes)('never changes: %s', async (statement) => {

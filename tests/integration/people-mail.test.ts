@@ -44,8 +44,8 @@ function fake(send: (mail: WaitingMail) => Promise<void> | void): MailTransport 
 const mail = (n: number) => ({ to: `reader${n}@marsh.example`, subject: `Number ${n}`, body: `Text ${n}` })
 const row = async (n: number) =>
   (
-    await connection.db.execute<{ sent: boolean; dead: boolean; attempts: number; wait: number; last_error: string }>(sql`
-      select sent_at is not null as sent, dead_at is not null as dead, attempts, last_error,
+    await connection.db.execute<{ sent: boolean; dead: boolean; attempts: number; wait: number; last_error: string; body: string }>(sql`
+      select sent_at is not null as sent, dead_at is not null as dead, attempts, last_error, body,
         extract(epoch from next_attempt_at - now())::float8 as wait
       from outbox where recipient = ${mail(n).to}`)
   ).rows[0]!
@@ -110,7 +110,7 @@ describe('a mail that cannot be sent', () => {
       await makeDue()
       await one.drain()
       state = await row(4)
-      expect(state).toMatchObject({ sent: false, dead: false, last_error: '451 try later' })
+      expect(state).toMatchObject({ sent: false, dead: false, last_error: '451 try later', body: 'Text 4' })
       expect(Math.abs(state.wait - waits[state.attempts - 1]!)).toBeLessThan(10)
       const tries = ids.length
       await one.drain()
@@ -119,7 +119,7 @@ describe('a mail that cannot be sent', () => {
     working = true
     await makeDue()
     await one.drain()
-    expect(await row(4)).toMatchObject({ sent: true, dead: false, last_error: '' })
+    expect(await row(4)).toMatchObject({ sent: true, dead: false, last_error: '', body: '' })
     expect(new Set(ids).size).toBe(1)
   })
 
@@ -129,7 +129,7 @@ describe('a mail that cannot be sent', () => {
     await one.drain()
     await connection.db.execute(sql`update outbox set created_at = now() - interval '24 hours 1 second', next_attempt_at = now()`)
     await one.drain()
-    expect(await row(5)).toMatchObject({ sent: false, dead: true, last_error: 'no route' })
+    expect(await row(5)).toMatchObject({ sent: false, dead: true, last_error: 'no route', body: '' })
     await makeDue()
     await one.drain()
     expect((await row(5)).attempts).toBe(2)
@@ -141,7 +141,7 @@ describe('a mail that cannot be sent', () => {
     )
     await queueMail(connection.db, mail(6))
     await one.drain()
-    expect(await row(6)).toMatchObject({ dead: true, attempts: 1 })
+    expect(await row(6)).toMatchObject({ dead: true, attempts: 1, body: '' })
   })
 
   it('does not hold up the others when its server hangs', async () => {

@@ -98,6 +98,23 @@ describe('a member', () => {
   })
 })
 
+describe('an admin', () => {
+  it('who has not confirmed their address looks after nobody', async () => {
+    const wanda = await app.signedIn('wanda')
+    await app.app.db.execute(sql`update members set email_verified_at = null where key = 'wanda'`)
+    await wanda.get('/api/members').expect(403)
+    await wanda.put(`/api/members/${id.tomasz}/role`).send({ role: 'admin' }).expect(403)
+    await wanda.put(`/api/members/${id.tomasz}/status`).send({ status: 'suspended' }).expect(403)
+    const refused = await wanda.delete(`/api/members/${id.tomasz}/sessions`).expect(403)
+    expect(refused.text).toContain('Confirm your e-mail address first')
+    const priya = await app.signedIn('priya')
+    await app.app.db.execute(sql`update members set email_verified_at = null where key = 'priya'`)
+    expect((await priya.get('/api/members').expect(403)).text).toContain('for admins')
+    await app.app.db.execute(sql`update members set email_verified_at = now() where key in ('wanda', 'priya')`)
+    await wanda.get('/api/members').expect(200)
+  })
+})
+
 describe('the last admin', () => {
   it('stays', async () => {
     const wanda = await app.signedIn('wanda')
@@ -128,5 +145,23 @@ describe('the last admin', () => {
     const answer = await app.agent().post('/api/session').send({ email, password: 'lantern on the far side' }).expect(200)
     expect(answer.body.member).toMatchObject({ name: 'First Admin', role: 'admin', verified: true })
     await expect(makeAdmin(app.app, { name: 'X', email })).rejects.toMatchObject({ status: 422 })
+  })
+
+  it('is whoever reads the mail, not whoever joined with the address before', async () => {
+    const email = 'squatted@marsh.example'
+    const password = 'i was here before anybody'
+    const squatter = app.agent()
+    await squatter.post('/api/members').send({ name: 'Early Bird', email, password }).expect(201)
+    const older = await tokenIn(app, email)
+    await squatter.post('/api/session').send({ email, password }).expect(200)
+    const token = new URL(await makeAdmin(app.app, { name: 'Late Admin', email })).searchParams.get('token')!
+    expect((await squatter.get('/api/session')).body.member).toBeNull()
+    await squatter.post('/api/session').send({ email, password }).expect(401)
+    await app.agent().post('/api/verifications').send({ token: older }).expect(422)
+    const state = async () =>
+      (await app.app.db.execute(sql`select role, email_verified_at is not null as verified from members where email = ${email}`)).rows[0]
+    expect(await state()).toEqual({ role: 'admin', verified: false })
+    await app.agent().post('/api/password-resets/redeem').send({ token, password: 'lantern on the far side' }).expect(204)
+    expect(await state()).toEqual({ role: 'admin', verified: true })
   })
 })

@@ -132,6 +132,49 @@ describe('changing the password', () => {
   })
 })
 
+describe('a password that changes at the same moment', () => {
+  /** Changes the row as a reset by mail does, and commits only once `meanwhile` waits for it. */
+  async function whileReset(email: string, meanwhile: () => PromiseLike<{ status: number }>): Promise<number> {
+    const { pool } = app.app.connection
+    const other = await pool.connect()
+    try {
+      const hash = await app.app.passwords.hash(NEW_PASSWORD)
+      await other.query('begin')
+      await other.query('update members set password_hash = $1 where email = $2', [hash, email])
+      await other.query('delete from sessions where member_id = (select id from members where email = $1)', [email])
+      const answer = Promise.resolve(meanwhile())
+      await expect
+        .poll(async () => (await pool.query(
+          `select 1 from pg_stat_activity where datname = current_database() and wait_event_type = 'Lock'`,
+        )).rowCount, { timeout: 10_000 })
+        .toBeGreaterThan(0)
+      await other.query('commit')
+      return (await answer).status
+    } finally {
+      other.release()
+    }
+  }
+
+  it('wins over a sign-in with the old one that is under way', async () => {
+    const { email, password, name } = person(7)
+    await joinAndVerify(app, { name, email, password })
+    expect(await whileReset(email, () => signIn(email, password))).toBe(401)
+    const { rows } = await app.app.db.execute(sql`
+      select 1 from sessions where member_id = (select id from members where email = ${email})`)
+    expect(rows).toEqual([])
+    await signIn(email, NEW_PASSWORD).expect(200)
+  })
+
+  it('wins over a change of the password that is under way', async () => {
+    const { email, password, name } = person(8)
+    const here = await joinAndVerify(app, { name, email, password })
+    const change = { currentPassword: password, newPassword: 'the third heat starts at noon' }
+    expect(await whileReset(email, () => here.put('/api/password').send(change))).toBe(403)
+    await signIn(email, change.newPassword).expect(401)
+    await signIn(email, NEW_PASSWORD).expect(200)
+  })
+})
+
 describe('stored passwords', () => {
   it('are argon2id with the full work, every one', async () => {
     const { rows } = await app.app.db.execute(sql`select password_hash from members where password_hash is not null`)

@@ -1,3 +1,4 @@
+import { request } from 'node:http'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { sql } from 'drizzle-orm'
 import { createTestApp, DEMO_PASSWORDS, type TestApp } from '../support/test-app.ts'
@@ -108,6 +109,45 @@ describe('a session', () => {
     } finally {
       await other.stop()
     }
+  })
+})
+
+describe('a form that is posted after the session ended', () => {
+  it('answers with the sign-in page and what was typed, as text, and a wrong password does not lose it', async () => {
+    const priya = app.agent()
+    await priya.post('/api/session').send(DEMO_PASSWORDS.priya).expect(200)
+    const { body: edit } = await priya.post('/api/edits').send({ chapter: 'C' }).expect(201)
+    await app.app.db.execute(sql`delete from sessions`)
+    const typed = { version: '1', title: 'Typed for an hour', body: 'Long.</textarea><script>alert(1)</script>', password: 'not to be shown' }
+    const answer = await priya.post(`/write/${edit.id}`).type('form').send(typed).expect(401)
+    expect(answer.text).toContain('What you typed; it was not sent')
+    expect(answer.text).toContain('Typed for an hour')
+    expect(answer.text).toContain(`value="/write/${edit.id}"`)
+    expect(answer.text).toContain('Long.&lt;/textarea&gt;&lt;script&gt;')
+    expect(answer.text).not.toContain('not to be shown')
+    const form = { 'typed.body': 'Long and careful', next: `/write/${edit.id}`, email: DEMO_PASSWORDS.priya!.email, password: 'not the one at all' }
+    const wrong = await priya.post('/sign-in').type('form').send(form).expect(401)
+    expect(wrong.text).toContain('Long and careful')
+    const right = await priya.post('/sign-in').type('form').send({ ...form, ...DEMO_PASSWORDS.priya }).expect(303)
+    expect(right.headers.location).toBe(`/write/${edit.id}`)
+  })
+
+  it('is sent to sign in when nothing was typed', async () => {
+    const answer = await app.agent().post('/write').type('form').send({ chapter: 'C' }).expect(303)
+    expect(answer.headers.location).toMatch(/^\/sign-in\?next=/)
+  })
+})
+
+describe('a request for no path', () => {
+  it('has no session and breaks nothing', async () => {
+    const { hostname, port } = new URL(app.url)
+    const status = await new Promise<number | undefined>((resolve, reject) => {
+      request({ hostname, port, method: 'OPTIONS', path: '*' }, (answer) => {
+        answer.resume()
+        resolve(answer.statusCode)
+      }).on('error', reject).end()
+    })
+    expect(status).toBeLessThan(500)
   })
 })
 

@@ -4,13 +4,13 @@ export type { GuidePreview }
 import type { Preview } from '#server/edits/views.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
 import type { GuideDraft } from '#shared/schemas/guide-content.ts'
-import { guidePage, type GuidePage } from '../../(reading)/guides/guide-page.ts'
-import { workedWords } from './worked-words.ts'
+import { guidePage, type GuidePage } from '#renderer/guides/guide-page.ts'
+import { exampleSentence, exampleWords } from '#renderer/guides/example-words.ts'
 
 /** A guide as its page would print it, without the people and numbers that only an edition has. */
 interface GuidePreview
   extends Pick<GuidePage, 'mark' | 'title' | 'inShort' | 'answers' | 'benchFacts' | 'lap' | 'segments' | 'sources'> {
-  problems: { line: number; message: string }[]
+  problems: { line: number; message: string; holds: boolean }[]
   /** Worked examples that do not match, in words, out of how many. */
   missed: string[]
   workedExamples: number
@@ -30,8 +30,8 @@ function previewPage(
       ...preview,
       answers: content.answers.filter(({ heading, text }) => heading !== '' || text !== ''),
       sources: content.sources.filter(({ text }) => text !== ''),
-      id: '', slug: '', mark, number: 0, chapter: { letter: '', name: '' },
-      edition: 0, editions: 0, summary: '', author: nobody, approver: nobody, contributors: [], publishedAt: '', firstPublishedAt: '',
+      slug: '', mark, chapter: { letter: '', name: '' },
+      edition: 0, editions: 0, author: nobody, approver: nobody, contributors: [], publishedAt: '', firstPublishedAt: '',
     },
     { path: '', query: {} },
   )
@@ -40,8 +40,10 @@ function previewPage(
     // Choosing a ground would ask the address of this page for it, and there is no such thing here.
     lap: page.lap === null ? null : { ...page.lap, grounds: [] },
     segments: page.segments, sources: page.sources,
-    problems: preview.problems.map(({ line, message }) => ({ line, message })),
-    missed: preview.workedExamples.filter(({ matches }) => !matches).map((example) => workedWords(example).words),
+    problems: preview.problems.map(({ line, message, holds }) => ({ line, message, holds })),
+    missed: preview.workedExamples
+      .filter(({ matches }) => !matches)
+      .map((example) => exampleSentence(exampleWords(example, calculators.get(example.slug)))),
     workedExamples: preview.workedExamples.length,
   }
 }

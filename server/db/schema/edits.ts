@@ -4,6 +4,7 @@ import { sql } from 'drizzle-orm'
 import {
   check, foreignKey, index, integer, jsonb, pgTable, text, timestamp, unique, uniqueIndex, uuid,
 } from 'drizzle-orm/pg-core'
+import type { ChangeSizes } from '#shared/editing/compare-guides.ts'
 import type { GuideDraft } from '#shared/schemas/guide-content.ts'
 import type { EditState } from '#shared/vocabulary/edit-states.ts'
 import { chapters, editions, guides } from './guides.ts'
@@ -30,6 +31,10 @@ const edits = pgTable(
     createdAt: timestamp({ withTimezone: true }).notNull().defaultNow(),
     updatedAt: timestamp({ withTimezone: true }).notNull().defaultNow(),
     sentAt: timestamp({ withTimezone: true }),
+    /** How much it changes against its base, counted when it is handed in; null while it is being written. */
+    changes: jsonb().$type<ChangeSizes>(),
+    /** The wanted guide it was begun from. No key: a wish that was granted is gone, and then this means nothing. */
+    wantedId: uuid(),
   },
   (t) => [
     foreignKey({

@@ -4,8 +4,9 @@ import { sql } from 'drizzle-orm'
 import {
   check, index, integer, jsonb, pgTable, text, timestamp, unique, uuid, type AnyPgColumn,
 } from 'drizzle-orm/pg-core'
+import type { ChangeSizes } from '#shared/editing/compare-guides.ts'
 import type { GuideContent } from '#shared/schemas/guide-content.ts'
-import type { RenderedPart } from '../rendered-part.ts'
+import type { RenderedPart } from '#shared/rendering/parts.ts'
 import { members } from './people.ts'
 
 const chapters = pgTable(
@@ -60,6 +61,8 @@ const editions = pgTable(
     /** The edit this edition came from; unique, so that no edit can be published twice. Null for the first stock. */
     editId: uuid(),
     summary: text().notNull(),
+    /** How much it changes against the edition before it, counted once; empty in editions from before this was kept. */
+    changes: jsonb().notNull().default({}).$type<Partial<ChangeSizes>>(),
     publishedAt: timestamp({ withTimezone: true }).notNull().defaultNow(),
   },
   (t) => [
@@ -69,6 +72,7 @@ const editions = pgTable(
     check('editions_number_positive', sql`${t.number} >= 1`),
     check('editions_not_own_approver', sql`${t.authorId} <> ${t.approverId}`),
     index('editions_published').on(t.publishedAt),
+    index('editions_author').on(t.authorId),
   ],
 )
 

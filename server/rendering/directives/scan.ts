@@ -1,5 +1,4 @@
 export { scanDirective }
-export type { ScannedDirective }
 
 import { parseAttributes } from './attributes.ts'
 

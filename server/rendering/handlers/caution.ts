@@ -1,17 +1,7 @@
 export { cautionHandler }
 
+import { CAUTION_KINDS, cautions, isCautionKind } from '#shared/vocabulary/cautions.ts'
 import type { DirectiveHandler } from './handler.ts'
-
-/** What can hurt, with the words and the mark it is shown by. */
-const CAUTION_KINDS = new Map([
-  ['lithium', { label: 'Lithium battery', mark: 'mk-cell' }],
-  ['spinning', { label: 'Spinning parts', mark: 'mk-gear' }],
-  ['heat', { label: 'Hot parts', mark: 'mk-heat' }],
-  ['solvent', { label: 'Solvent', mark: 'mk-bottle' }],
-  ['soldering', { label: 'Soldering', mark: 'mk-iron' }],
-  ['cutting', { label: 'Cutting tools', mark: 'mk-blade' }],
-  ['eyes', { label: 'Eyes', mark: 'mk-eye' }],
-])
 
 /**
  * `:::caution{kind=lithium}` … `:::`: a passage on something that can injure or burn. A caution whose kind is
@@ -24,15 +14,15 @@ const cautionHandler: DirectiveHandler = {
   label: 'none',
   toMarkup({ attributes }, context) {
     const given = attributes.get('kind')
-    const kind = given === undefined ? undefined : CAUTION_KINDS.get(given)
+    const kind = isCautionKind(given) ? cautions[given] : undefined
     if (kind === undefined) {
       context.report(
         'unknown_kind',
-        `Say what can hurt: :::caution{kind=…} with one of ${[...CAUTION_KINDS.keys()].join(', ')}.`,
+        `Say what can hurt: :::caution{kind=…} with one of ${CAUTION_KINDS.join(', ')}.`,
       )
     }
-    const name = kind === undefined ? 'Caution' : `Caution: ${kind.label}`
-    const kindLine = kind === undefined ? '' : `<p class="caution-k">${mark(kind.mark)}${kind.label}</p>`
+    const name = kind === undefined ? 'Caution' : `Caution: ${kind.name}`
+    const kindLine = kind === undefined ? '' : `<p class="caution-k">${mark(`mk-${kind.mark}`)}${kind.name}</p>`
     return {
       before: `<aside class="caution" role="note" aria-label="${name}">`
         + `<span class="caution-m">${mark('mk-caution')}<span>Caution</span></span><div class="caution-b">${kindLine}`,

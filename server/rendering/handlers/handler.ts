@@ -1,7 +1,7 @@
 export type { DirectiveHandler, HandlerContext, Markup, PartWithoutNumber }
 
 import type { Directive, DirectiveForm } from '../directives/directive.ts'
-import type { CalculatorPart, EffectsPart, WorkedPart } from '../types.ts'
+import type { CalculatorPart, EffectsPart, WorkedPart } from '#shared/rendering/parts.ts'
 import type { VocabularyIndex } from '../vocabulary-index.ts'
 
 /** HTML around what the directive holds; a directive that holds nothing has it all in `before`. */

@@ -1,6 +1,7 @@
 export { Rendering }
 
-import type { Heading, RenderedPart, RenderProblem } from '../types.ts'
+import type { RenderedPart } from '#shared/rendering/parts.ts'
+import type { Heading, RenderProblem } from '../types.ts'
 import type { VocabularyIndex } from '../vocabulary-index.ts'
 
 const MAX_PROBLEMS = 50

@@ -6,7 +6,7 @@ import { directiveOf } from '../directives/plugin.ts'
 import { escapeHtml } from '../escape-html.ts'
 import { handlers } from '../handlers/index.ts'
 import type { DirectiveHandler, HandlerContext, Markup, PartWithoutNumber } from '../handlers/handler.ts'
-import { partPlaceholder } from '../split-parts.ts'
+import { partPlaceholder } from '#shared/rendering/split-parts.ts'
 import type { Rendering } from './rendering.ts'
 import { eachBlock, eachInline } from './walk.ts'
 

@@ -2,7 +2,8 @@ export { groupByWish }
 export type { LapChange, Wish }
 
 import type { AdjustableView, LapEffect } from '#server/effects/index.ts'
-import { CHANGES, DIRECTIONS, type Change } from '#shared/vocabulary/effect-words.ts'
+import { withOpposites } from '#shared/effects/with-opposites.ts'
+import { CHANGES, type Change } from '#shared/vocabulary/effect-words.ts'
 import { QUALITIES, qualities, type Quality } from '#shared/vocabulary/qualities.ts'
 
 /** One change to try, the way it has to be moved for what the driver wants. */
@@ -27,21 +28,13 @@ interface Wish {
 
 /**
  * Sorts the published effects of one part of the lap by what a driver may want there. An effect that mirrors counts for
- * the opposite direction with the opposite change, unless that direction has an effect of its own on the same quality.
+ * both directions.
  */
 function groupByWish(effects: readonly LapEffect[], adjustables: readonly AdjustableView[]): Wish[] {
   const byKey = new Map(adjustables.map((adjustable) => [adjustable.key, adjustable]))
-  const stated = new Set(effects.map((effect) => `${effect.adjustable} ${effect.direction} ${effect.quality}`))
-  const moves = effects.flatMap((effect) => {
-    const adjustable = byKey.get(effect.adjustable)
-    if (adjustable === undefined) return []
-    const opposite = DIRECTIONS.find((direction) => direction !== effect.direction)!
-    const moved = (direction: typeof opposite, change: Change, mirrored: boolean) => ({
-      effect, adjustable, direction, change, mirrored, way: direction === 'up' ? adjustable.up : adjustable.down,
-    })
-    const own = moved(effect.direction, effect.change, false)
-    if (!effect.mirrors || stated.has(`${effect.adjustable} ${opposite} ${effect.quality}`)) return [own]
-    return [own, moved(opposite, effect.change === 'more' ? 'less' : 'more', true)]
+  const moves = withOpposites(effects).flatMap((moved) => {
+    const adjustable = byKey.get(moved.effect.adjustable)
+    return adjustable === undefined ? [] : [{ ...moved, adjustable, way: adjustable[moved.direction] }]
   })
   const keyOf = (move: (typeof moves)[number]) => `${move.effect.adjustable} ${move.direction} ${move.effect.quality}`
   const changesOf = new Map<string, Set<Change>>()

@@ -6,7 +6,7 @@ import { getReview } from '#server/edits/get-review.ts'
 import { getEdition } from '#server/guides/get-edition.ts'
 import { forPage } from '#server/http/page-abort.ts'
 import { previewPage, type GuidePreview } from '../../parts/guide-preview.ts'
-import { workedWords } from '../../parts/worked-words.ts'
+import { exampleSentence, exampleWords } from '#renderer/guides/example-words.ts'
 
 type Data = Awaited<ReturnType<typeof data>>
 
@@ -27,8 +27,11 @@ async function data(pageContext: PageContextServer) {
       proposed: review.proposed === null ? null : previewPage({ content: review.content, mark, preview: review.proposed }, ctx.calculators),
       published: await publishedPage(),
       refused: review.refused.map(({ message }) => message),
-      problems: review.proposed?.problems.map(({ line, message }) => ({ line, message })) ?? [],
-      examples: (review.proposed?.workedExamples ?? []).map((example) => ({ n: example.n, matches: example.matches, ...workedWords(example) })),
+      problems: review.proposed?.problems.map(({ line, message, holds }) => ({ line, message, holds })) ?? [],
+      examples: (review.proposed?.workedExamples ?? []).map((example) => {
+        const words = exampleWords(example, ctx.calculators.get(example.slug))
+        return { n: words.n, matches: words.matches, verdict: words.verdict, words: exampleSentence(words) }
+      }),
       baseMoved: moved === null ? null : { edition: moved.edition, mergeable: moved.mergeable, conflicts: moved.conflicts },
     }
 

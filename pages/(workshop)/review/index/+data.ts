@@ -2,17 +2,11 @@ export { data }
 export type { Data, QueueRow }
 
 import type { PageContextServer } from 'vike/types'
-import type { ServiceContext } from '#server/context.ts'
-import { getEdit } from '#server/edits/get-edit.ts'
 import { listEdits } from '#server/edits/list-edits.ts'
 import type { EditEntry } from '#server/edits/views.ts'
-import { getEdition } from '#server/guides/get-edition.ts'
 import { listFreshInk } from '#server/guides/list-fresh-ink.ts'
 import { forPage } from '#server/http/page-abort.ts'
-import { compareGuides, type ChangeSizes } from '#shared/editing/compare-guides.ts'
-import { emptyGuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
 import type { EditState } from '#shared/vocabulary/edit-states.ts'
-import { plainContent } from '../../parts/plain-content.ts'
 
 type Data = Awaited<ReturnType<typeof data>>
 type QueueRow = Data['edits'][number]
@@ -31,7 +25,7 @@ async function data(pageContext: PageContextServer) {
     return {
       shelf,
       now: ctx.clock().toISOString(),
-      edits: await Promise.all(list.edits.map((edit) => queueRow(ctx, edit, reader?.id))),
+      edits: list.edits.map((edit) => queueRow(edit, reader?.id)),
       page: list.page,
       pages: list.pages,
       total: list.total,
@@ -40,19 +34,7 @@ async function data(pageContext: PageContextServer) {
   })
 }
 
-async function queueRow(ctx: ServiceContext, edit: EditEntry, readerId: string | undefined) {
-  const { id, title, guide, chapter, author, summary, sentAt, updatedAt, baseEdition, state } = edit
-  const sizes = state === 'in_review' ? await sizesOf(ctx, edit) : null
+function queueRow(edit: EditEntry, readerId: string | undefined) {
+  const { id, title, guide, chapter, author, summary, sentAt, updatedAt, baseEdition, state, changes: sizes } = edit
   return { id, title, guide, chapter, author, summary, sentAt, updatedAt, baseEdition, state, sizes, isMine: author.id === readerId }
-}
-
-async function sizesOf(ctx: ServiceContext, { id, guide, baseEdition }: EditEntry): Promise<ChangeSizes> {
-  const [{ content }, base] = await Promise.all([getEdit(ctx, id), baseOf(ctx, guide?.slug, baseEdition)])
-  return compareGuides(base, content).counts
-}
-
-async function baseOf(ctx: ServiceContext, slug: string | undefined, number: number | null): Promise<GuideDraft> {
-  if (slug === undefined || number === null) return emptyGuideContent()
-  const edition = await getEdition(ctx, { slug, number })
-  return 'movedTo' in edition ? emptyGuideContent() : plainContent(edition)
 }

@@ -2,6 +2,7 @@ export { guideMarks }
 export type { MarkGroup }
 
 import type { MarkName } from '#renderer/icons/marks.ts'
+import { CAUTION_KINDS, cautions, type CautionKind } from '#shared/vocabulary/cautions.ts'
 import type { Mark } from './insert-mark.ts'
 
 interface MarkGroup {
@@ -26,15 +27,16 @@ interface Known {
   adjustables: readonly { key: string; name: string }[]
 }
 
-const cautions = [
-  ['lithium', 'Lithium battery', 'Charge where you can see it.', 'A cell that is hurt can burn minutes later.'],
-  ['spinning', 'Spinning parts', 'Unplug the motor first.', 'A lost signal can spin the wheels up.'],
-  ['heat', 'Hot parts', 'Let it cool before you touch it.', 'A motor can be hot enough to burn.'],
-  ['solvent', 'Solvent', 'Work with the door open.', 'Follow the maker’s instructions on the can.'],
-  ['soldering', 'Soldering', 'Hold the part, not the wire.', 'Solder stays hot longer than it shines.'],
-  ['cutting', 'Cutting tools', 'Cut away from your hand.', 'A blade slips when the plastic gives.'],
-  ['eyes', 'Eyes', 'Put glasses on.', 'Clips and chips fly.'],
-] as const
+/** A skeleton of each caution: the order, then the reason. */
+const cautionWords: Record<CautionKind, { order: string; reason: string }> = {
+  lithium: { order: 'Charge where you can see it.', reason: 'A cell that is hurt can burn minutes later.' },
+  spinning: { order: 'Unplug the motor first.', reason: 'A lost signal can spin the wheels up.' },
+  heat: { order: 'Let it cool before you touch it.', reason: 'A motor can be hot enough to burn.' },
+  solvent: { order: 'Work with the door open.', reason: 'Follow the maker’s instructions on the can.' },
+  soldering: { order: 'Hold the part, not the wire.', reason: 'Solder stays hot longer than it shines.' },
+  cutting: { order: 'Cut away from your hand.', reason: 'A blade slips when the plastic gives.' },
+  eyes: { order: 'Put glasses on.', reason: 'Clips and chips fly.' },
+}
 
 /** What can be put into a guide's text, in the order of the spine. */
 function guideMarks({ calculators, adjustables }: Known): MarkGroup[] {
@@ -55,8 +57,9 @@ function guideMarks({ calculators, adjustables }: Known): MarkGroup[] {
     },
     {
       key: 'caution', name: 'Caution', icon: 'caution', about: 'Where someone can get hurt: the order first, then the reason.',
-      choices: cautions.map(([kind, name, order, reason]) => ({
-        key: kind, name, mark: block(`:::caution{kind=${kind}}\n|${order}| ${reason}\n:::`),
+      choices: CAUTION_KINDS.map((kind) => ({
+        key: kind, name: cautions[kind].name,
+        mark: block(`:::caution{kind=${kind}}\n|${cautionWords[kind].order}| ${cautionWords[kind].reason}\n:::`),
       })),
     },
     {

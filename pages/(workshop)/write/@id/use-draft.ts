@@ -23,6 +23,8 @@ interface Start {
   kept: Snapshot
   /** What the form begins with: the same, or words that were refused, or both sides put together. */
   start: Snapshot
+  /** What the form begins with is only proposed: nothing of it is saved before the writer does something. */
+  proposed: boolean
 }
 
 type DraftDesk = ReturnType<typeof useDraft>
@@ -31,7 +33,7 @@ type DraftDesk = ReturnType<typeof useDraft>
  * The life of a draft on the page: what is typed, where the newest words are kept, and which other copies there are.
  * Nothing here runs before the page is mounted, so that server and browser begin alike.
  */
-function useDraft({ id, version: startVersion, updatedAt, kept, start }: Start) {
+function useDraft({ id, version: startVersion, updatedAt, kept, start, proposed }: Start) {
   const draft = reactive(editableDraft(start.content))
   const summary = ref(start.summary)
   const state = ref<KeeperState>({ name: 'saved', at: new Date(updatedAt) })
@@ -125,7 +127,7 @@ function useDraft({ id, version: startVersion, updatedAt, kept, start }: Start) 
     )
     // Words that the club refused a moment ago are newer than anything this device has kept.
     if (sameDraft(start.content, kept.content) && start.summary === kept.summary) restore()
-    watch(newest, (snapshot) => keeper!.typed(snapshot), { immediate: true })
+    watch(newest, (snapshot) => keeper!.typed(snapshot), { immediate: !proposed })
     watch(() => keeper!.wouldLose && state.value.name !== 'saved', warnBeforeLeaving)
     addEventListener('online', backOnline)
     addEventListener('pagehide', leave)

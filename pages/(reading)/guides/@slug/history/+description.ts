@@ -1,7 +1,7 @@
 export { description }
 
 import type { PageContextServer } from 'vike/types'
-import { capital, counted } from '../../../count-words.ts'
+import { capital, counted } from '#renderer/words/count-words.ts'
 import type { Data } from './+data.ts'
 
 function description({ data: { history } }: PageContextServer<Data>): string {

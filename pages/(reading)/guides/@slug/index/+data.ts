@@ -5,7 +5,7 @@ import { redirect } from 'vike/abort'
 import type { PageContextServer } from 'vike/types'
 import { getGuide } from '#server/guides/get-guide.ts'
 import { forPage } from '#server/http/page-abort.ts'
-import { guidePage } from '../../guide-page.ts'
+import { guidePage } from '#renderer/guides/guide-page.ts'
 
 type Data = Awaited<ReturnType<typeof data>>
 

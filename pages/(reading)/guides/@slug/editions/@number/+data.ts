@@ -5,7 +5,7 @@ import { redirect } from 'vike/abort'
 import type { PageContextServer } from 'vike/types'
 import { getEdition } from '#server/guides/get-edition.ts'
 import { forPage } from '#server/http/page-abort.ts'
-import { guidePage } from '../../../guide-page.ts'
+import { guidePage } from '#renderer/guides/guide-page.ts'
 
 type Data = Awaited<ReturnType<typeof data>>
 

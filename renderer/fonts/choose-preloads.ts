@@ -1,0 +1,23 @@
+export { choosePreloads }
+
+interface PageAsset {
+  assetType: string | null
+  src: string
+  inject: false | 'HTML_BEGIN' | 'HTML_END'
+}
+
+/** What nearly every page sets in type at once. The other files wait until a page holds a character of theirs. */
+const FIRST = ['camber-read-text.', 'camber-read-text-signs.', 'camber-read-sign.', 'camber-work.']
+
+/**
+ * What a page asks the browser to fetch early: of the fonts, which Vike would preload all, those that most pages need; of the
+ * scripts, also the small pieces of the entry, which would otherwise be found one after the other.
+ * https://vike.dev/injectFilter
+ */
+function choosePreloads(assets: PageAsset[]): void {
+  for (const asset of assets) {
+    const file = asset.src.split('/').at(-1) ?? ''
+    if (asset.assetType === 'font' && !FIRST.some((name) => file.startsWith(name))) asset.inject = false
+    if (asset.assetType === 'script' && asset.inject === false) asset.inject = 'HTML_END'
+  }
+}

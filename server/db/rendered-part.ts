@@ -1,1 +1,0 @@
-export type { RenderedPart } from '../rendering/index.ts'
