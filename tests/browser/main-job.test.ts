@@ -55,6 +55,11 @@ describe.each(WIDTHS)('the main job at %i px', (width) => {
     await writer.page.goto(address)
     expect(await writer.page.getByLabel('Your words').inputValue()).toContain(sentence)
     await writer.page.getByLabel('What did you change, in one line?').fill('Says to count the turns twice')
+    // Sent when every word is saved already: pressing is then the only thing left to do.
+    await Promise.all([
+      writer.page.waitForResponse((response) => response.request().method() === 'PUT' && response.ok()),
+      writer.page.getByRole('button', { name: 'Keep as a draft' }).click(),
+    ])
     await writer.page.getByRole('button', { name: 'Send for review' }).click()
     await writer.page.getByText('Waiting for review').first().waitFor()
 
