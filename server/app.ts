@@ -4,16 +4,20 @@ export type { RunningApp }
 import { createServer, type AddressInfo } from 'node:net'
 import express, { Router, type Express } from 'express'
 import pino from 'pino'
-import { calculatorRoutes, loadCalculators } from './calculators/index.ts'
+import { calculatorRoutes, describeCalculators, loadCalculators } from './calculators/index.ts'
+import { carsApi, carsDescription, carsForms } from './cars/index.ts'
 import type { Config } from './config.ts'
 import type { App } from './context.ts'
 import { connectDatabase } from './db/client.ts'
-import { editsApi, editsForms } from './edits/index.ts'
+import { editsApi, editsDescription, editsForms } from './edits/index.ts'
 import { NotFoundError } from './errors.ts'
-import { guidesApi } from './guides/index.ts'
+import { feelApi, feelDescription } from './feel/index.ts'
+import { guidesApi, guidesDescription } from './guides/index.ts'
 import { formBodies, jsonBodies } from './http/body-parsers.ts'
 import { discovery } from './http/discovery.ts'
-import { health } from './http/health.ts'
+import { health, healthDescription } from './http/health.ts'
+import type { ApiDescription } from './http/openapi/describe.ts'
+import { openApi } from './http/openapi/route.ts'
 import { createPageCache } from './http/page-cache.ts'
 import { pageErrors } from './http/page-errors.ts'
 import { apiErrors } from './http/problem-details.ts'
@@ -28,8 +32,9 @@ import { sheetChoice } from './http/sheet-choice.ts'
 import { staticFiles } from './http/static-files.ts'
 import { createTidyUp } from './maintenance/tidy.ts'
 import { createMailWorker, startMailCapture, type MailWorker } from './mail/index.ts'
-import { mailboxApi, peopleApi, peopleForms, sessionMiddleware } from './people/index.ts'
+import { mailboxApi, mailboxDescription, peopleApi, peopleDescription, peopleForms, sessionMiddleware } from './people/index.ts'
 import { createPasswords } from './people/passwords.ts'
+import { sessionCookieName } from './people/session-cookie.ts'
 import { createGuideRenderer } from './rendering/index.ts'
 import { loadRenderVocabulary } from './guides/render-vocabulary.ts'
 import { readVersion } from './version.ts'
@@ -82,7 +87,7 @@ async function createApp(config: Config, options: { clock?: () => Date } = {}): 
   server.use(health(app, readVersion()))
   server.use(sessionMiddleware(app), requestContext(app), refuseCrossSite(config.origin))
   server.use('/api', apiRoutes(app))
-  server.use(formBodies(), sheetChoice({ secure: config.secureCookies }), peopleForms(app), editsForms(app), discovery(app))
+  server.use(formBodies(), sheetChoice({ secure: config.secureCookies }), peopleForms(app), editsForms(app), carsForms(), discovery(app))
   if (config.liveReload) await useLiveReload(server)
   server.get('/{*path}', renderPages())
   server.use(() => {
@@ -109,13 +114,28 @@ function apiRoutes(app: App): Router {
     next()
   })
   router.use(...jsonBodies())
-  router.use(calculatorRoutes(app.calculators), guidesApi(app), editsApi(app), peopleApi(app))
+  router.use(calculatorRoutes(app.calculators), guidesApi(app), editsApi(app), carsApi(app), feelApi(), peopleApi(app))
   if (app.mailbox !== undefined) router.use(mailboxApi(app))
+  router.use(openApi(describeApi(app), { version: readVersion(), sessionCookie: sessionCookieName(app.config.secureCookies) }))
   router.use((req) => {
     throw new NotFoundError('API address', req.originalUrl)
   })
   router.use(apiErrors)
   return router
+}
+
+/** What stands in /api/openapi.json: one description for each router above that answers under /api. */
+function describeApi(app: App): ApiDescription[] {
+  return [
+    guidesDescription,
+    describeCalculators(app.calculators),
+    editsDescription,
+    carsDescription,
+    feelDescription,
+    peopleDescription,
+    ...(app.mailbox === undefined ? [] : [mailboxDescription]),
+    healthDescription,
+  ]
 }
 
 function freePort(): Promise<number> {

@@ -113,15 +113,13 @@ describe('an instrument without a script', () => {
 
   it('fills in the reader’s car and says so', async () => {
     const definition = await loadCalculator('fluid-temperature')
-    const [bottle] = definition.inputs
-    const withCarKey = {
-      ...definition,
-      inputs: [{ ...bottle!, carKey: 'frontDiffFluid' }, ...definition.inputs.slice(1)],
-    }
-    const props = { ...heat, car: { name: 'Kestrel 8e', values: { frontDiffFluid: 10000 } } }
-    document.body.innerHTML = await renderToString(createInstrumentApp(withCarKey, props, createPinia()))
-    expect(text('.tape')).toBe('Filled in from Kestrel 8e')
+    const car = { id: 'kestrel', name: 'Kestrel 8e', values: { frontDiffFluid: 10000 } }
+    document.body.innerHTML = await renderToString(
+      await createInstrumentApp(definition, { ...heat, car }, createPinia()),
+    )
+    expect(text('.ct-on b')).toBe('Kestrel 8e')
     expect(field('viscosityAt25').value).toBe('10,000')
+    expect((document.querySelector('[name="heat.end"]') as HTMLInputElement).value).toBe('front')
   })
 
   it('has no style attribute, no script and one element for every id it names', async () => {
@@ -145,6 +143,26 @@ it('draws the marks of the identity', () => {
 })
 
 describe('an instrument come to life', () => {
+  it('copies the whole working as text', async () => {
+    const copied: string[] = []
+    vi.stubGlobal('navigator', { clipboard: { writeText: async (what: string) => void copied.push(what) } })
+    await bringToLife(await serve())
+    ;(document.querySelector('.work-do button') as HTMLButtonElement).click()
+    await vi.waitFor(() => expect(text('.work-do [role=status]')).toBe('The working is copied.'))
+    vi.unstubAllGlobals()
+    const lines = copied.join().replaceAll('\u00A0', ' ').split('\n')
+    expect(lines.slice(0, 2)).toEqual([
+      'What your fluid acts like when it is hot',
+      'Your 7,000 cSt fluid acts like about 4,080 cSt at 55 °C.',
+    ])
+    expect(lines).toContain('Temperature now: 55 °C')
+    expect(lines).toContain('   = 4,082 cSt')
+    expect(lines).toContain('Acts like, now: 4,080 cSt')
+    expect(lines.some((line) => line.startsWith('Good between: 0 and 60'))).toBe(true)
+    expect(lines.some((line) => line.startsWith('Source: '))).toBe(true)
+    expect(lines.at(-2)).toContain('heat.temperature=55')
+  })
+
   it.each<Record<string, string>>([
     {},
     { temperature: '155' },

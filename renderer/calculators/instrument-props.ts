@@ -3,6 +3,8 @@ export type { InstrumentProps }
 
 import type { InjectionKey } from 'vue'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
+import type { CarEnd } from '#shared/cars/car-ends.ts'
+import type { CarSheet } from '#shared/cars/car.ts'
 import type { UnitChoices } from '#shared/units/unit-choices.ts'
 
 /**
@@ -21,8 +23,10 @@ interface InstrumentProps {
   action?: string
   /** Units to begin with, before the address says otherwise. */
   units?: UnitChoices
-  /** The reader's own car: its name, and its values by `carKey`. */
-  car?: { name: string; values: Record<string, number> }
+  /** The chosen car of a signed-in reader; a visitor's is taken from the browser once a script runs. */
+  car?: CarSheet
+  /** The end of the car it is about, where the guide says so. */
+  end?: CarEnd
   /** Level of the heading; 3 inside a guide's section. */
   headingLevel?: 2 | 3
 }

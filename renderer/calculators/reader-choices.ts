@@ -2,22 +2,65 @@ export { useReaderChoices }
 
 import { defineStore } from 'pinia'
 import { unitChoicesFrom, type UnitChoices, type UnitGroupKey } from '#shared/units/unit-choices.ts'
+import { chosenKeptCar, KEPT_CARS } from '../cars/kept-cars.ts'
+import { handOverCars, isMembersPage } from '../cars/hand-over.ts'
+import type { CarKey } from '#shared/cars/car-values.ts'
+import type { CarSheet } from '#shared/cars/car.ts'
 import type { UnitId } from '#shared/units/units.ts'
 
 const storageKey = 'camber-clay.units'
 
+/** A number that a reader changed in one instrument, for the others. */
+interface ChangedValue {
+  value: number
+  /** Rises with every change. */
+  at: number
+}
+
 /**
- * In which units this reader wants to read: one choice for all instruments of a page, kept in this browser
- * only. On the server and until `load` it is empty, so that what hydrates is what was rendered.
+ * What all instruments of a page have in common: the units this reader wants to read in and their car, both kept in this
+ * browser, and the values they have changed on this page. On the server and until `load` it is empty, so that
+ * what hydrates is what was rendered.
  */
 const useReaderChoices = defineStore('reader-choices', {
-  state: () => ({ units: {} as UnitChoices, loaded: false }),
+  state: () => ({
+    units: {} as UnitChoices,
+    car: undefined as CarSheet | undefined,
+    changed: {} as Partial<Record<CarKey, ChangedValue>>,
+    changes: 0,
+    loaded: false,
+  }),
   actions: {
-    /** Reads the kept choices once, in the browser. */
+    /** Reads what is kept, once, in the browser. */
     load() {
       if (this.loaded) return
       this.loaded = true
       this.units = { ...readStored(), ...this.units }
+      this.takeCar()
+      // Another tab may change the car, and so may a page that one comes back from.
+      addEventListener('storage', ({ key }) => {
+        if (key === KEPT_CARS || key === null) this.takeCar()
+      })
+      addEventListener('pageshow', ({ persisted }) => {
+        if (persisted) this.takeCar()
+      })
+      if (this.car !== undefined && isMembersPage()) void this.handOver()
+    },
+    takeCar() {
+      // What was handed over to an account stays in use on the page.
+      this.car = chosenKeptCar() ?? (isMembersPage() ? this.car : undefined)
+    },
+    async handOver() {
+      const merged = await handOverCars()
+      const chosen = merged?.cars.find((car) => car.chosen)
+      if (chosen !== undefined) this.car = chosen
+    },
+    /** Tells the other instruments what a value of the car is for now; the car itself keeps its own. */
+    change(key: CarKey, value: number): number {
+      const at = this.changes + 1
+      this.changed = { ...this.changed, [key]: { value, at } }
+      this.changes = at
+      return at
     },
     chooseUnit(group: UnitGroupKey, unit: UnitId) {
       this.units = { ...this.units, [group]: unit }

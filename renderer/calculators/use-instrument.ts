@@ -1,5 +1,5 @@
 export { useInstrument }
-export type { InstrumentField }
+export type { Instrument, InstrumentField }
 
 import { computed, onMounted, reactive, ref, watch } from 'vue'
 import { checkEach } from '#shared/calculators/check-inputs.ts'
@@ -7,12 +7,16 @@ import { runDefinition, type CalculatorRun } from '#shared/calculators/run-defin
 import { nextStep } from '#shared/calculators/steps.ts'
 import { typedValue } from '#shared/calculators/typed-inputs.ts'
 import { unitChoicesFrom, unitFor, unitGroupsOf, type UnitGroupKey } from '#shared/units/unit-choices.ts'
+import { endOf } from './car-inputs.ts'
 import { fieldText, startField, startValues, type FieldState } from './field-state.ts'
 import { useReaderChoices } from './reader-choices.ts'
+import { useMyCar } from './use-my-car.ts'
 import type { CalculatorDefinition, CalculatorInput } from '#shared/calculators/definition.ts'
 import type { Sentence } from '#shared/calculators/sentence.ts'
 import type { UnitId } from '#shared/units/units.ts'
 import type { InstrumentProps } from './instrument-props.ts'
+
+type Instrument = ReturnType<typeof useInstrument>
 
 interface InstrumentField {
   input: CalculatorInput
@@ -41,7 +45,8 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
   const units = computed(() => (alive.value ? { ...startUnits, ...store.units } : startUnits))
 
   const fields = reactive<Record<string, FieldState>>({})
-  for (const input of definition.inputs) fields[input.key] = startField(input, props, typedIn, startUnits)
+  const at = { ...props, end: endOf(definition, props) }
+  for (const input of definition.inputs) fields[input.key] = startField(input, at, typedIn, startUnits)
 
   const typedErrors = computed(() =>
     definition.inputs.flatMap(({ key }) => {
@@ -67,16 +72,26 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
     run.value.ok ? run.value : (last ?? runDefinition(definition, startValues(definition, props))),
   )
 
+  const put = (input: CalculatorInput, value: number, own?: true) => {
+    fields[input.key] = { text: fieldText(value, input, units.value), value, ...(own && { own }) }
+  }
+  const myCar = useMyCar({ definition, props, alive, fields, put })
+
   function type(input: CalculatorInput, text: string) {
     const typed = typedValue(input, text, unitFor(input.unit, units.value))
-    fields[input.key] = 'value' in typed ? { text, value: typed.value } : { text, error: typed.error }
+    fields[input.key] = { text, own: true, ...typed }
+    if ('value' in typed) myCar.tell(input, typed.value)
   }
   function set(input: CalculatorInput, value: number) {
-    fields[input.key] = { text: fieldText(value, input, units.value), value }
+    put(input, value, true)
+    myCar.tell(input, value)
   }
-  function reset() {
-    const start = startValues(definition, { preset: props.preset })
-    for (const input of definition.inputs) set(input, start[input.key] ?? input.default)
+  /** Several at once, by key: what dragging a point moves. */
+  function setMany(values: Readonly<Record<string, number>>) {
+    for (const input of definition.inputs) {
+      const value = values[input.key]
+      if (value !== undefined) set(input, value)
+    }
   }
   function chooseUnit(group: UnitGroupKey, unit: UnitId) {
     store.chooseUnit(group, unit)
@@ -89,7 +104,7 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
       for (const input of definition.inputs) {
         const field = fields[input.key]
         if (field?.value === undefined || unitFor(input.unit, now) === unitFor(input.unit, before)) continue
-        set(input, field.value)
+        put(input, field.value, field.own)
       }
     },
     { flush: 'sync' },
@@ -118,6 +133,7 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
   onMounted(() => {
     alive.value = true
     store.load()
+    myCar.arrive()
   })
 
   const groups = unitGroupsOf(
@@ -125,7 +141,13 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
       ({ unit }) => unit,
     ),
   )
-  return { alive, units, groups, fields: shown, run, lastGood, type, set, reset, chooseUnit }
+  return {
+    alive, units, groups, fields: shown, run, lastGood, type, set, setMany, chooseUnit,
+    /** Back to the values of the guide, whatever the car says. */
+    reset: myCar.useGuideValues,
+    definition, props,
+    ...myCar,
+  }
 }
 
 function groupParameters({ values = {} }: InstrumentProps, prefix: string): Record<string, string> {

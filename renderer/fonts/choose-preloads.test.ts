@@ -14,6 +14,17 @@ describe('choosePreloads', () => {
     expect(assets.map((asset) => asset.inject)).toEqual(['HTML_BEGIN', false, 'HTML_BEGIN', false, 'HTML_BEGIN'])
   })
 
+  it.each(['/assets/static/renderer_styles_%-ae41ef73.D0.css', '/renderer/styles/%.css?direct'])('takes one beginning of two: %s', (address) => {
+    const style = (name: string) => ({ assetType: 'style', src: address.replace('%', name), inject: 'HTML_BEGIN' as Inject })
+    const chosen = (...names: string[]) => {
+      const assets = names.map(style)
+      choosePreloads(assets)
+      return names.filter((_, at) => assets[at]!.inject)
+    }
+    expect(chosen('plain-pages', 'home', 'reading')).toEqual(['plain-pages', 'home'])
+    expect(chosen('history', 'reading')).toEqual(['history', 'reading'])
+  })
+
   it('knows every file it keeps, and those stay within 40 kB', () => {
     const files = readdirSync('renderer/fonts').filter((file) => file.endsWith('.woff2'))
     const assets = files.map((file) => font(file.replace('.woff2', '')))

@@ -1,6 +1,7 @@
 export { guidePage }
 export type { GuidePage, PageSection }
 
+import type { CarSheet } from '#shared/cars/car.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
 import { buildLapRows, type LapRow } from '#shared/effects/lap-rows.ts'
 import type { GuideContent } from '#shared/schemas/guide-content.ts'
@@ -60,7 +61,7 @@ interface GuideLap {
 function guidePage(
   { calculators }: { calculators: ReadonlyMap<string, CalculatorDefinition> },
   guide: GuideEdition,
-  { path, query }: { path: string; query: Readonly<Record<string, string>> },
+  { path, query, car }: { path: string; query: Readonly<Record<string, string>>; car?: CarSheet | undefined },
 ): GuidePage {
   const lap = guideLap(guide, query.ground)
   const benchFacts = [
@@ -75,7 +76,7 @@ function guidePage(
     approver: guide.approver, contributors: guide.contributors, publishedAt: guide.publishedAt, firstPublishedAt: guide.firstPublishedAt,
     lap,
     benchFacts,
-    segments: guideSegments(guide, { calculators, path, query }),
+    segments: guideSegments(guide, { calculators, path, query, car }),
     restsOn: (Object.keys(bases) as Basis[])
       .filter((basis) => guide.effects.some((effect) => effect.basis === basis))
       .map((basis) => bases[basis].toLowerCase()),

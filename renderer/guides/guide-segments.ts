@@ -7,6 +7,7 @@ import type { CalculatorPart, RenderedPart } from '#shared/rendering/parts.ts'
 import { buildLapRows, type AdjustableWords, type LapRow } from '#shared/effects/lap-rows.ts'
 import type { Effect } from '#shared/schemas/effect.ts'
 import { parametersFor } from '#shared/calculators/query.ts'
+import type { CarSheet } from '#shared/cars/car.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
 import type { InstrumentProps } from '../calculators/instrument-props.ts'
 import { exampleWords, type ExampleWords } from './example-words.ts'
@@ -43,13 +44,15 @@ interface Surroundings {
   /** Path of the page, where the calculators' forms go. */
   path: string
   query: Readonly<Record<string, string>>
+  /** The reader's own car, where the server knows it. */
+  car?: CarSheet | undefined
 }
 
 /**
  * Cuts a stored body at its parts and fills these in: lap lines from the effects, calculators with what the address says
  * about them, worked examples computed again. A calculator that is no longer there leaves no hole: its part is left out.
  */
-function guideSegments(body: GuideBody, { calculators, path, query }: Surroundings): GuideSegment[] {
+function guideSegments(body: GuideBody, { calculators, path, query, car }: Surroundings): GuideSegment[] {
   const instanceOf = instanceNames(body.parts)
   const examples = new Map(runWorkedExamples({ calculators }, body.parts).map((example) => [example.n, example]))
   return splitParts(body.html, body.parts).flatMap((segment): GuideSegment[] => {
@@ -71,6 +74,7 @@ function guideSegments(body: GuideBody, { calculators, path, query }: Surroundin
           props: {
             slug: segment.slug, instanceId, action: path, headingLevel: 3, values: parametersFor(query, instanceId),
             ...(Object.keys(segment.preset).length > 0 ? { preset: segment.preset } : {}),
+            ...(car && { car }),
           },
         }]
       }

@@ -18,7 +18,9 @@ describe('placesFor', () => {
   })
 
   it.each([
-    ['/', 'The lap'],
+    ['/', 'By feel'],
+    ['/feel', 'By feel'],
+    ['/lap/entry', 'By feel'],
     ['/chapters', 'Chapters'],
     ['/chapters/b', 'Chapters'],
     ['/guides/rear-toe', 'Chapters'],

@@ -23,9 +23,10 @@ interface Place {
 }
 
 const places = [
-  { href: '/', name: 'The lap' },
+  { href: '/feel', name: 'By feel' },
   { href: '/chapters', name: 'Chapters' },
   { href: '/calculators', name: 'Calculators' },
+  { href: '/my-car', name: 'My car' },
   { href: '/glossary', name: 'Glossary' },
   { href: '/write', name: 'Write' },
 ]
@@ -41,9 +42,9 @@ function placesFor(reader: PageReader | null, path: string): Place[] {
   return shown
 }
 
-// A guide belongs to the chapters and a part of the lap to the lap: that is where a reader came from.
+// A guide belongs to the chapters, and the front page and the parts of the lap to by feel: that is where they lead.
 function standsIn(place: string, path: string): boolean {
-  if (place === '/') return path === '/' || path.startsWith('/lap/')
+  if (place === '/feel' && (path === '/' || path.startsWith('/lap/'))) return true
   if (place === '/chapters' && path.startsWith('/guides/')) return true
   return path === place || path.startsWith(`${place}/`)
 }

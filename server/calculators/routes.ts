@@ -14,7 +14,7 @@ const runBody = z.strictObject(
   {
     inputs: z.record(
       z.string(),
-      z.unknown(),
+      z.unknown().meta({ type: 'number' }),
       'Give the inputs as an object of numbers, { "inputs": { "key": number } }.',
     ),
   },

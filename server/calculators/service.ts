@@ -1,37 +1,18 @@
 export { getCalculator, listCalculators, runCalculator }
 export type { CalculatorResult, CalculatorSummary }
 
+import type { z } from 'zod'
 import { NotFoundError, ValidationError } from '#server/errors.ts'
 import { mathmlString, mathText } from '#shared/calculators/mathml.ts'
 import { runDefinition } from '#shared/calculators/run-definition.ts'
 import { plainSentence } from '#shared/calculators/sentence.ts'
 import { unitById } from '#shared/units/units.ts'
 import type { CalculatorDefinition, FieldMessage, WorkingStep } from '#shared/calculators/definition.ts'
+import type { CalculatorAnswer, RunAnswer } from './answers.ts'
 import type { CalculatorRegistry } from './load-registry.ts'
 
-interface CalculatorSummary {
-  slug: string
-  title: string
-  inputs: { key: string; unit: string; default: number; min: number; max: number }[]
-  outputs: { key: string; unit: string }[]
-}
-
-interface CalculatorResult {
-  /** The inputs that were used: those given, and the defaults of those left out. */
-  inputs: Record<string, number>
-  outputs: Record<string, number>
-  /** The result as one sentence, in the calculator's units. */
-  answer: string
-  warnings: { field: string; message: string }[]
-  working: {
-    title: string
-    formula?: string
-    mathml?: string
-    numbers?: string
-    value?: number
-    unit?: string
-  }[]
-}
+type CalculatorSummary = z.infer<typeof CalculatorAnswer>
+type CalculatorResult = z.infer<typeof RunAnswer>
 
 /** All calculators with their inputs and outputs, without the words. */
 function listCalculators(registry: CalculatorRegistry): CalculatorSummary[] {

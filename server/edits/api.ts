@@ -1,10 +1,11 @@
-export { editsApi }
+export { ListQuery, editsApi }
 
 import { Router, type Request, type RequestHandler, type Response } from 'express'
 import { z } from 'zod'
 import type { App, ServiceContext } from '../context.ts'
 import { ValidationError } from '../errors.ts'
 import { idempotent } from '../http/idempotency.ts'
+import { pageNumber } from '../http/page-number.ts'
 import { can } from '../people/permissions.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { EDIT_STATES } from '#shared/vocabulary/edit-states.ts'
@@ -28,8 +29,7 @@ import type { EditView } from './views.ts'
 const ListQuery = z.strictObject({
   state: z.enum(EDIT_STATES, { error: 'State: choose one of ' + EDIT_STATES.join(', ') + '.' }).optional(),
   whose: z.enum(['mine', 'everyone'], { error: 'Whose: mine or everyone.' }).optional(),
-  page: z.coerce.number({ error: 'Page: a whole number from 1.' }).int({ error: 'Page: a whole number from 1.' })
-    .min(1, { error: 'Page: a whole number from 1.' }).max(100_000, { error: 'There are not that many pages.' }).optional(),
+  page: pageNumber.optional(),
 })
 
 type EditRequest = Request<{ id: string }>

@@ -8,6 +8,7 @@ import { findAdjustables, type AdjustableView } from '../effects/index.ts'
 import { isAppError, type FieldProblem } from '../errors.ts'
 import { requirePermission } from '../people/permissions.ts'
 import { compareGuides, type GuideComparison } from '#shared/editing/compare-guides.ts'
+import type { EffectDraft } from '#shared/schemas/effect.ts'
 import { emptyGuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
 import { viewOf } from './edit-view.ts'
 import { loadEdit } from './load-edit.ts'
@@ -17,7 +18,7 @@ import type { EditView, Preview } from './views.ts'
 interface ReviewView extends Omit<EditView, 'changes'> {
   /** What the edit started from; an empty guide for a new one. */
   base: GuideDraft
-  changes: GuideComparison
+  changes: GuideComparison<EffectDraft>
   /** As it would be published; null when the body cannot be rendered, and then `refused` says why. */
   proposed: Preview | null
   refused: FieldProblem[]

@@ -8,12 +8,13 @@ import { requirePermission, requireSignedIn } from '../people/permissions.ts'
 import type { EditState } from '#shared/vocabulary/edit-states.ts'
 import { entryOf, listEditRows } from './edit-row.ts'
 import type { EditEntry } from './views.ts'
+import { entriesAsHandedIn } from './words-handed-in.ts'
 
 const EDITS_PER_PAGE = 50
 
 interface EditListQuery {
   state?: EditState | undefined
-  /** `everyone` is for moderators, and never shows what was not handed in. @default 'mine' */
+  /** `everyone` is for moderators, and never shows what was not handed in: no drafts, and no rewriting that was not sent. @default 'mine' */
   whose?: 'mine' | 'everyone' | undefined
   page?: number | undefined
 }
@@ -37,5 +38,6 @@ async function listEdits(ctx: ServiceContext, { state, whose = 'mine', page = 1 
     ctx.db.select({ total: count() }).from(edits).where(where),
   ])
   const total = totals?.total ?? 0
-  return { edits: rows.map(entryOf), page, pages: Math.max(1, Math.ceil(total / EDITS_PER_PAGE)), total }
+  const shown = whose === 'mine' ? rows : await entriesAsHandedIn(ctx, rows)
+  return { edits: shown.map(entryOf), page, pages: Math.max(1, Math.ceil(total / EDITS_PER_PAGE)), total }
 }

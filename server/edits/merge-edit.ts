@@ -8,6 +8,7 @@ import { changeEdit, requireState, requireVersion } from './change-edit.ts'
 import { editView } from './edit-view.ts'
 import { MergeInput } from './inputs.ts'
 import { loadEdit } from './load-edit.ts'
+import { summaryToKeep } from './summary-to-keep.ts'
 import type { EditView } from './views.ts'
 
 /**
@@ -29,7 +30,7 @@ async function mergeEdit(ctx: ServiceContext, { id, ...input }: { id: string } &
     content,
     changes: null,
     baseEditionId: edit.publishedEditionId,
-    ...(summary === undefined ? {} : { summary }),
+    ...(summary === undefined ? {} : summaryToKeep(edit, summary)),
   })
   return editView(ctx, id)
 }

@@ -6,6 +6,7 @@ import { effectRow, findAdjustables } from '../effects/index.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { requirePermission } from '../people/permissions.ts'
 import { holdsBack } from '../rendering/index.ts'
+import { isWholeEffect } from '#shared/schemas/effect.ts'
 import type { GuideDraft } from '#shared/schemas/guide-content.ts'
 import { renderBody } from './check-content.ts'
 import { PreviewInput } from './inputs.ts'
@@ -27,13 +28,15 @@ async function previewGuide(ctx: ServiceContext, input: z.input<typeof PreviewIn
 async function previewOf(ctx: ServiceContext, content: GuideDraft, owner: string): Promise<Preview> {
   const { html, parts, headings, problems } = await renderBody(ctx, content.body, { owner })
   const named = parts.flatMap((part) => (part.kind === 'effects' ? [part.adjustable] : []))
-  const adjustables = await findAdjustables(ctx, [...content.effects.map((effect) => effect.adjustable), ...named])
+  // An unfinished effect says nothing yet, so there is nothing to lay out.
+  const effects = content.effects.filter(isWholeEffect)
+  const adjustables = await findAdjustables(ctx, [...effects.map((effect) => effect.adjustable), ...named])
   const byKey = new Map(adjustables.map((adjustable) => [adjustable.key, adjustable]))
   return {
     html,
     parts,
     headings,
-    effects: content.effects.map((effect) => effectRow(effect, byKey.get(effect.adjustable))),
+    effects: effects.map((effect) => effectRow(effect, byKey.get(effect.adjustable))),
     problems: problems.map((problem) => ({ ...problem, holds: holdsBack(problem) })),
     workedExamples: runWorkedExamples(ctx, parts),
     adjustables,

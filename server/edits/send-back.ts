@@ -8,12 +8,13 @@ import { queueMail } from '../mail/outbox.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { requirePermission } from '../people/permissions.ts'
 import { recordAudit } from '../records/audit.ts'
-import { changeEdit, requireState } from './change-edit.ts'
+import { changeEdit, requireState, requireVersion } from './change-edit.ts'
 import { editView } from './edit-view.ts'
 import { ReasonInput } from './inputs.ts'
 import { loadEdit } from './load-edit.ts'
 import { askedMail, declinedMail } from './mails.ts'
 import type { EditView } from './views.ts'
+import { wordsHandedIn } from './words-handed-in.ts'
 
 const outcomes = {
   ask: { state: 'changes_asked', mail: askedMail },
@@ -32,12 +33,15 @@ async function sendBack(
   await ctx.rateLimits.take('write', actor.id)
   const { version, reason } = parseInput(ReasonInput, input)
   requireState(edit, decision)
+  requireVersion(edit, version)
   const { state, mail } = outcomes[decision]
   try {
     await ctx.db.transaction(async (tx) => {
       await changeEdit(tx, { id, version }, decision, { state })
       await tx.insert(reviews).values({ editId: id, editVersion: version, reviewerId: actor.id, decision, reason, decidedAt: ctx.clock() })
-      await recordAudit({ ...ctx, db: tx }, { action: `edit.${decision}`, subjectKind: 'edit', subjectId: id, details: { version } })
+      await recordAudit({ ...ctx, db: tx }, {
+        action: `edit.${decision}`, subjectKind: 'edit', subjectId: id, details: { version, ...(decision === 'ask' ? { words: wordsHandedIn(edit) } : {}) },
+      })
       if (edit.author.email !== null) {
         const { email: to, name } = edit.author
         await queueMail(tx, mail({ config: ctx.config, to, name, title: edit.title, moderator: actor.name, editId: id, reason }))

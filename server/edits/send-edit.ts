@@ -5,7 +5,7 @@ import type { z } from 'zod'
 import type { ServiceContext } from '../context.ts'
 import type { Transaction } from '../db/client.ts'
 import { edits, members } from '../db/schema/index.ts'
-import { ConflictError, ValidationError } from '../errors.ts'
+import { ConflictError } from '../errors.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { recordAudit } from '../records/audit.ts'
 import { baseMovedError, mergeWithPublished } from './base-moved.ts'
@@ -36,19 +36,17 @@ async function sendEdit(
   requireVersion(edit, version)
   await ctx.rateLimits.take('send', edit.authorId)
   const summary = Summary.safeParse(given ?? edit.summary)
-  if (!summary.success) {
-    throw new ValidationError('Say in one line what you changed.', [{ field: 'summary', message: summary.error.issues[0]!.message }])
-  }
+  const besides = summary.success ? [] : [{ field: 'summary', message: summary.error.issues[0]!.message }]
   const moved = await mergeWithPublished(ctx, edit)
   if (moved !== null && !moved.mergeable) throw baseMovedError(moved)
-  const { content } = await checkContent(ctx, moved?.merged ?? edit.content)
+  const { content } = await checkContent(ctx, moved?.merged ?? edit.content, besides)
   const baseEditionId = moved === null ? edit.baseEditionId : edit.publishedEditionId
   const changes = await countChanges(ctx, baseEditionId, content)
   await ctx.db.transaction(async (tx) => {
     await requireRoomAtTheDesk(tx, edit.authorId)
     const sent = await changeEdit(tx, { id, version }, 'send', {
       content,
-      summary: summary.data,
+      summary: summary.data!,
       state: 'in_review',
       sentAt: ctx.clock(),
       changes,

@@ -99,6 +99,6 @@ async function act(ctx: ServiceContext, form: WriteForm): Promise<string> {
   if (rows !== null) return `${page}#${rows.list}`
   if (button === 'preview') return `${page}?show=preview#preview`
   if (button !== 'send') return `${page}?said=saved`
-  const sent = await sendEdit(ctx, { id, version: saved.version })
+  const sent = await sendEdit(ctx, { id, version: saved.version, summary })
   return `${page}?said=${sent.merged ? 'sent_merged' : 'sent'}`
 }

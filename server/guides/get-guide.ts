@@ -1,16 +1,13 @@
 export { getGuide }
 
-import { asc, eq } from 'drizzle-orm'
 import type { ServiceContext } from '../context.ts'
-import { effects } from '../db/schema/index.ts'
-import { effectColumns } from '../effects/effect-columns.ts'
 import { NotFoundError } from '../errors.ts'
 import { findEdition, findMoved } from './edition-query.ts'
 import { editionView } from './edition-view.ts'
 import type { GuideView, Moved } from './views.ts'
 
 /**
- * The published edition of a guide, with its effects as they stand in the effects table. Four statements.
+ * The published edition of a guide.
  * @returns `movedTo` when the guide has another address now
  * @throws NotFoundError
  */
@@ -21,6 +18,5 @@ async function getGuide(ctx: Pick<ServiceContext, 'db'>, slug: string): Promise<
     if (moved !== null) return moved
     throw new NotFoundError('guide', slug)
   }
-  const rows = await ctx.db.select(effectColumns).from(effects).where(eq(effects.guideId, row.guideId)).orderBy(asc(effects.position))
-  return editionView(ctx, row, rows)
+  return editionView(ctx, row)
 }

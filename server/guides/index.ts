@@ -1,5 +1,6 @@
 // The door: what the rest of the server and the pages may use of guides.
 export { guidesApi } from './routes.ts'
+export { guidesDescription } from './api-description.ts'
 export { compareEditions } from './compare-editions.ts'
 export type { EditionComparison } from './compare-editions.ts'
 export { createGuide } from './create-guide.ts'

@@ -2,17 +2,12 @@ export { listChapters }
 export type { ChapterEntry }
 
 import { asc, sql } from 'drizzle-orm'
+import type { z } from 'zod'
 import type { ServiceContext } from '../context.ts'
 import { chapters } from '../db/schema/index.ts'
+import type { ChapterAnswer } from './answers.ts'
 
-interface ChapterEntry {
-  letter: string
-  name: string
-  about: string
-  /** How many guides are published in it, and how many are wanted. */
-  guides: number
-  wanted: number
-}
+type ChapterEntry = z.infer<typeof ChapterAnswer>
 
 async function listChapters(ctx: Pick<ServiceContext, 'db'>): Promise<ChapterEntry[]> {
   return ctx.db

@@ -1,9 +1,10 @@
-export { guidesApi }
+export { GuidesQuery, guidesApi }
 
 import { Router } from 'express'
 import { z } from 'zod'
 import type { App } from '../context.ts'
 import { listAdjustables } from '../effects/index.ts'
+import { pageNumber } from '../http/page-number.ts'
 import { parseInput } from '../people/parse-input.ts'
 import { getGlossary } from './get-glossary.ts'
 import { getGuide } from './get-guide.ts'
@@ -12,8 +13,7 @@ import { listGuides } from './list-guides.ts'
 
 const GuidesQuery = z.strictObject({
   chapter: z.string().regex(/^[A-Z]$/, { error: 'Chapter: one capital letter, such as B.' }).optional(),
-  page: z.coerce.number({ error: 'Page: a whole number from 1.' }).int({ error: 'Page: a whole number from 1.' })
-    .min(1, { error: 'Page: a whole number from 1.' }).max(100_000, { error: 'There are not that many pages.' }).default(1),
+  page: pageNumber.default(1),
 })
 
 /** Reading: guides, chapters, glossary, adjustables. */

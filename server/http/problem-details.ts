@@ -2,6 +2,7 @@ export { apiErrors, sendProblem, toAppError }
 
 import type { ErrorRequestHandler, Request, Response } from 'express'
 import { AppError, isAppError } from '../errors.ts'
+import type { Problem } from './problem.ts'
 
 /** Answers with `application/problem+json` (RFC 9457). `errors` names each field at fault. */
 function sendProblem(req: Request, res: Response, error: AppError): void {
@@ -20,7 +21,7 @@ function sendProblem(req: Request, res: Response, error: AppError): void {
         code: error.code,
         instance: `urn:uuid:${req.id}`,
         ...(error.fields.length > 0 ? { errors: error.fields } : {}),
-      }),
+      } satisfies Problem),
     )
 }
 

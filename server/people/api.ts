@@ -1,7 +1,9 @@
-export { peopleApi }
+export { MembersQuery, peopleApi }
 
 import { Router } from 'express'
+import { z } from 'zod'
 import type { App } from '../context.ts'
+import { pageNumber } from '../http/page-number.ts'
 import { askForReset } from './ask-for-reset.ts'
 import { changeRole, changeStatus, endMemberSessions } from './change-member.ts'
 import { changePassword } from './change-password.ts'
@@ -9,11 +11,14 @@ import { SAME_ANSWER } from './same-answer.ts'
 import { join } from './join.ts'
 import { listMembers } from './list-members.ts'
 import { endOtherSessions, endOwnSession, listOwnSessions } from './own-sessions.ts'
+import { parseInput } from './parse-input.ts'
 import { resendVerification } from './resend-verification.ts'
 import { resetPassword } from './reset-password.ts'
 import { endSession, renewSession, startSession } from './session.ts'
 import { signIn } from './sign-in.ts'
 import { verifyEmail } from './verify-email.ts'
+
+const MembersQuery = z.strictObject({ page: pageNumber.default(1) })
 
 /** Joining, signing in and what follows from it, and the admin's members, under /api. */
 function peopleApi(app: App): Router {
@@ -24,7 +29,7 @@ function peopleApi(app: App): Router {
     res.status(201).json({ message: SAME_ANSWER.join })
   })
   router.get('/members', async (req, res) => {
-    res.json(await listMembers(req.ctx, Number(req.query.page ?? 1)))
+    res.json(await listMembers(req.ctx, parseInput(MembersQuery, req.query).page))
   })
   router.put('/members/:id/role', async (req, res) => {
     const { id, name, role, status } = await changeRole(req.ctx, { ...asObject(req.body), memberId: req.params.id })

@@ -1,5 +1,7 @@
 export { peopleApi } from './api.ts'
+export { peopleDescription } from './api-description.ts'
 export { describeDemoSignIns, ensureDemoSignIns } from './demo-sign-ins.ts'
 export { peopleForms } from './forms.ts'
 export { mailboxApi } from './mailbox-api.ts'
+export { mailboxDescription } from './mailbox-description.ts'
 export { sessionMiddleware } from './session.ts'

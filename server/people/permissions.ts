@@ -28,6 +28,8 @@ const permissions = {
     isMember(actor) && (actor.id === edit.authorId || (isModerator(actor) && edit.sentAt !== null)),
   'preview.render': (actor: Actor) => isVerified(actor),
   'queue.read': (actor: Actor) => isModerator(actor),
+  // One's own and nobody else's: the services look for a car only among those of who asks.
+  'car.keep': (actor: Actor) => isMember(actor),
   'member.list': (actor: Actor) => isAdmin(actor),
   'member.change_role': (actor: Actor) => isAdmin(actor),
   'member.suspend': (actor: Actor) => isAdmin(actor),
@@ -73,6 +75,7 @@ const refusals: Record<Permission, { toDo: string; why: string }> = {
   'edit.note': { toDo: 'write a note', why: 'Only its writer and the moderators can write notes on this edit.' },
   'preview.render': { toDo: 'see a preview', why: 'You cannot write yet.' },
   'queue.read': { toDo: 'open the review desk', why: 'The review desk is for moderators.' },
+  'car.keep': { toDo: 'keep a car in your account', why: 'You cannot keep a car.' },
   'member.list': { toDo: 'see the members', why: 'The list of members is for admins.' },
   'member.change_role': { toDo: 'change roles', why: 'Admins give out roles.' },
   'member.suspend': { toDo: 'suspend members', why: 'Admins suspend members and sign them out.' },

@@ -8,7 +8,7 @@ import { members } from '../db/schema/index.ts'
 import { AppError, SignInRequiredError } from '../errors.ts'
 import { describeDevice } from './device.ts'
 import type { Member } from './find-member.ts'
-import { sessionCookieName } from './session-cookie.ts'
+import { SESSION_COOKIES, sessionCookieName } from './session-cookie.ts'
 import { createSessionStore, insertSession, renameSession } from './session-store.ts'
 import type { MemberRole } from '#shared/vocabulary/roles.ts'
 
@@ -40,9 +40,10 @@ const LIFETIMES: Record<MemberRole, { idle: number; absolute: number }> = {
 /**
  * Sessions in PostgreSQL, by a cookie that only who has signed in ever gets. A session is written once, when it starts;
  * later requests only move its end on, so that a request under way cannot bring back a session that was ended meanwhile.
+ * Reading without the cookie needs no session: none is looked for and none begins.
  */
 function sessionMiddleware(app: App): RequestHandler {
-  return session({
+  const withSession = session({
     name: sessionCookieName(app.config.secureCookies),
     secret: app.config.sessionSecret,
     store: createSessionStore(app),
@@ -51,6 +52,12 @@ function sessionMiddleware(app: App): RequestHandler {
     rolling: true,
     cookie: { path: '/', httpOnly: true, sameSite: 'lax', secure: app.config.secureCookies, maxAge: LIFETIMES.member.idle },
   })
+  return (req, res, next) => {
+    const reads = req.method === 'GET' || req.method === 'HEAD'
+    const cookies = req.headers.cookie ?? ''
+    if (reads && !SESSION_COOKIES.some((name) => cookies.includes(`${name}=`))) next()
+    else withSession(req, res, next)
+  }
 }
 
 /**
@@ -58,7 +65,7 @@ function sessionMiddleware(app: App): RequestHandler {
  * met as such at once, whatever their session says.
  */
 async function actorFromSession(app: App, req: Request): Promise<Actor> {
-  // Some requests have no session at all, such as `OPTIONS *`, which is for no path.
+  // Requests without a cookie that only read have none, nor has `OPTIONS *`, which is for no path.
   const session = req.session as Request['session'] | undefined
   if (session?.memberId === undefined) return visitor
   const { memberId, startedAt } = session

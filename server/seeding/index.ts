@@ -3,17 +3,20 @@ export { seedDatabase }
 import { sql } from 'drizzle-orm'
 import { loadCalculators } from '../calculators/index.ts'
 import { connectDatabase, type Database } from '../db/client.ts'
-import { adjustables, chapters, glossaryTerms, guides, members, wantedGuides } from '../db/schema/index.ts'
+import { adjustables, chapters, firstLooks, glossaryTerms, guides, members, wantedGuides } from '../db/schema/index.ts'
 import { loadRenderVocabulary } from '../guides/render-vocabulary.ts'
 import { seedGuide } from '../guides/index.ts'
 import { createGuideRenderer } from '../rendering/index.ts'
+import { complaintKey, complaints } from '#shared/vocabulary/complaints.ts'
 import { readContent, type BookContent, type GuideFile } from './read-content.ts'
+import { seedDemoCars } from './demo-cars.ts'
 import { seedDeskEdit } from './desk-edit.ts'
 
 /**
  * Fills the database with the book in `content/`. Idempotent: what is already there is left as it is, so that words
  * which members have improved since are never put back.
- * @param options.demo also puts one edit on the review desk, so that a demonstration has something to decide
+ * @param options.demo also puts one edit on the review desk, so that a demonstration has something to decide, and gives
+ *   two members their cars
  * @returns how many guides were new
  */
 async function seedDatabase(url: string, options: { demo: boolean }): Promise<{ guides: number }> {
@@ -38,7 +41,10 @@ async function seedDatabase(url: string, options: { demo: boolean }): Promise<{ 
       })
       if (outcome.created) created += 1
     }
-    if (options.demo && created > 0) await seedDeskEdit(connection.db, authors)
+    if (options.demo && created > 0) {
+      await seedDeskEdit(connection.db, authors)
+      await seedDemoCars(connection.db, authors)
+    }
     return { guides: created }
   } finally {
     await renderer.close()
@@ -66,9 +72,22 @@ async function seedShelves(db: Database, content: BookContent): Promise<void> {
     )
     .onConflictDoNothing()
   await db.insert(glossaryTerms).values(content.glossary).onConflictDoNothing()
+  await seedFirstLooks(db, content.firstLooks)
   // Only into a new book: a wish that is missing later was granted, and must not come back at the next start.
   const [guide] = await db.select({ id: guides.id }).from(guides).limit(1)
   if (guide === undefined) await db.insert(wantedGuides).values(content.wanted).onConflictDoNothing()
+}
+
+/** Only for complaints that have none yet: what moderators changed stays as they left it. */
+async function seedFirstLooks(db: Database, looks: BookContent['firstLooks']): Promise<void> {
+  const known = await db.selectDistinct({ phase: firstLooks.phase, quality: firstLooks.quality, wants: firstLooks.wants }).from(firstLooks)
+  const rows = complaints
+    .filter((complaint) => !known.some((each) => complaintKey(each) === complaintKey(complaint)))
+    .flatMap((complaint) => {
+      const { phase, quality, wants } = complaint
+      return (looks[complaintKey(complaint)] ?? []).map((says, position) => ({ phase, quality, wants, position, says }))
+    })
+  if (rows.length > 0) await db.insert(firstLooks).values(rows).onConflictDoNothing()
 }
 
 /** The writers of the book, named but without a way to sign in. */

@@ -41,6 +41,10 @@ const Term = z.strictObject({
   long: z.string().default(''),
   standard: z.string().default(''),
 })
+const FirstLooks = z.record(
+  z.string().regex(/^\w+\.\w+\.(more|less)$/, 'A complaint is written as entry.steering.more.'),
+  z.array(z.string().min(10).max(160)).min(2).max(4),
+)
 const Wanted = z.strictObject({ chapter: z.string(), title: z.string(), why: z.string() })
 const GuideHead = z.looseObject({
   chapter: z.string(),
@@ -64,6 +68,8 @@ interface BookContent {
   adjustables: z.infer<typeof Adjustable>[]
   glossary: z.infer<typeof Term>[]
   wanted: z.infer<typeof Wanted>[]
+  /** What to look at before anything is changed, by complaint. */
+  firstLooks: z.infer<typeof FirstLooks>
   guides: GuideFile[]
 }
 
@@ -79,13 +85,18 @@ async function readContent(folder = contentFolder): Promise<BookContent> {
     adjustables: await readList(folder, 'adjustables.yaml', Adjustable),
     glossary: await readList(folder, 'glossary.yaml', Term),
     wanted: await readList(folder, 'wanted.yaml', Wanted),
+    firstLooks: await readYaml(folder, 'first-looks.yaml', FirstLooks),
     guides: await Promise.all(slugs.map((name) => readGuide(folder, name))),
   }
 }
 
 async function readList<S extends z.ZodType>(folder: string, name: string, row: S): Promise<z.infer<S>[]> {
+  return readYaml(folder, name, z.array(row))
+}
+
+async function readYaml<S extends z.ZodType>(folder: string, name: string, schema: S): Promise<z.infer<S>> {
   const parsed: unknown = parse(await readFile(`${folder}/${name}`, 'utf8'))
-  return checked(name, z.array(row), parsed)
+  return checked(name, schema, parsed)
 }
 
 async function readGuide(folder: string, name: string): Promise<GuideFile> {

@@ -2,6 +2,8 @@ export { defineCalculator }
 export type {
   CalculatorAnswer,
   CalculatorCaution,
+  CalculatorComparison,
+  CalculatorCursor,
   CalculatorDefinition,
   CalculatorInput,
   CalculatorOutput,
@@ -14,9 +16,11 @@ export type {
   WorkingStep,
 }
 
+import type { DrawingSpec } from './drawing.ts'
 import type { MathNode } from './mathml.ts'
 import type { PlotSpec } from './plot.ts'
 import type { Figure, Sentence } from './sentence.ts'
+import type { CarEnd, CarKey } from '#shared/cars/car-values.ts'
 import type { UnitId } from '#shared/units/units.ts'
 import type { CautionKind } from '#shared/vocabulary/cautions.ts'
 
@@ -49,8 +53,11 @@ interface CalculatorInput<Key extends string = string> {
   ladder?: readonly number[]
   /** One short sentence under the field: where to read this off the car. */
   help?: string
-  /** Which value of “my car” fills this in. */
-  carKey?: string
+  /**
+   * Which value of “my car” fills this in. Where the calculator is about one end of the car, one for each end
+   * that has such a part; the reader then says which end is meant.
+   */
+  carKey?: CarKey | Partial<Record<CarEnd, CarKey>>
 }
 
 interface CalculatorOutput<Key extends string = string> {
@@ -96,13 +103,32 @@ interface CalculatorWorking {
 }
 
 /**
- * A table with a head for every row; cells of a row share its unit. `mark` is the column or row that is the
- * reader's own.
+ * A table with a head for every row; cells of a row share its unit. An `own` row, the column at place
+ * `ownColumn` (from 0) or the cell where both cross is the reader's own.
  */
 interface CalculatorTable {
   caption: string
   columns: readonly string[]
   rows: readonly { label: Sentence; unit: UnitId; digits: number; cells: readonly number[]; own?: true }[]
+  ownColumn?: number
+}
+
+/** What is, beside what would be. The first column is the car as it is, the second the change. */
+interface CalculatorComparison extends CalculatorTable {
+  /** The difference in words: “0.2 mm thicker makes this bar 38 % stiffer.” */
+  says: Sentence
+}
+
+/**
+ * A movement that the reader can go through without changing any input, such as the travel of the wheel.
+ * Plots and drawings get the place as `at`; the numbers of the answer stay those at `start`.
+ */
+interface CalculatorCursor<In extends string = string> {
+  label: string
+  unit: UnitId
+  step: number
+  start: number
+  ends(inputs: Record<In, number>): readonly [number, number]
 }
 
 interface CalculatorSource {
@@ -146,9 +172,13 @@ interface CalculatorDefinition<In extends string = string, Out extends string = 
   warnings(inputs: Record<In, number>, outputs: Record<Out, number>): FieldMessage[]
   answer(inputs: Record<In, number>, outputs: Record<Out, number>): CalculatorAnswer
   working(inputs: Record<In, number>, outputs: Record<Out, number>): CalculatorWorking
-  plots?(inputs: Record<In, number>, outputs: Record<Out, number>): readonly PlotSpec[]
+  cursor?: CalculatorCursor<In>
+  /** `at` is the place of the cursor; without a cursor it is 0. */
+  plots?(inputs: Record<In, number>, outputs: Record<Out, number>, at: number): readonly PlotSpec[]
+  /** To scale, moving with the numbers. */
+  drawings?(inputs: Record<In, number>, outputs: Record<Out, number>, at: number): readonly DrawingSpec[]
   /** Before and after, where a change is being considered. */
-  comparison?(inputs: Record<In, number>, outputs: Record<Out, number>): CalculatorTable
+  comparison?(inputs: Record<In, number>, outputs: Record<Out, number>): CalculatorComparison
   /** Further tables, such as the neighbouring pinions. */
   tables?(inputs: Record<In, number>, outputs: Record<Out, number>): readonly CalculatorTable[]
   limits: { goodBetween: string; howClose: string }

@@ -1,9 +1,9 @@
-export { fenced, fn, frac, math, mathmlString, mathText, num, power, row, sub }
+export { fenced, fn, frac, math, mathmlString, mathText, num, power, root, row, sub }
 export type { MathNode, MathPart }
 
 import { formatNumber } from '#shared/units/format-number.ts'
 
-type MathTag = 'math' | 'mrow' | 'mi' | 'mn' | 'mo' | 'mtext' | 'mfrac' | 'msup' | 'msub'
+type MathTag = 'math' | 'mrow' | 'mi' | 'mn' | 'mo' | 'mtext' | 'mfrac' | 'msup' | 'msub' | 'msqrt'
 
 /** One MathML element (MathML Core). Leaves have `text`, all others `children`. */
 interface MathNode {
@@ -62,6 +62,10 @@ function sub(base: MathPart, index: string): MathNode {
   return { tag: 'msub', children: [node(base), below] }
 }
 
+function root(...parts: MathPart[]): MathNode {
+  return { tag: 'msqrt', children: [row(...parts)] }
+}
+
 function fenced(...parts: MathPart[]): MathNode {
   return row('(', ...parts, ')')
 }
@@ -100,6 +104,7 @@ function mathText(part: MathNode): string {
   if (part.tag === 'mfrac') return `(${first})/(${second})`
   if (part.tag === 'msup') return `${first}^(${second})`
   if (part.tag === 'msub') return `${first}_${second}`
+  if (part.tag === 'msqrt') return `√(${first})`
   return children.join('')
 }
 

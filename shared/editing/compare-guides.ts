@@ -1,6 +1,7 @@
 export { compareGuides, noChanges }
 export type { ChangeSizes, GuideComparison }
 
+import type { Effect, EffectDraft } from '../schemas/effect.ts'
 import type { GuideDraft } from '../schemas/guide-content.ts'
 import { compareBodies, type BodyChange } from './compare-bodies.ts'
 import { compareEffects, compareSources, type EffectChange, type SourceChange } from './compare-lists.ts'
@@ -27,19 +28,20 @@ interface ChangeSizes {
 
 const noChanges: ChangeSizes = { words: 0, fields: 0, effects: 0, calculators: 0, pictures: 0, sources: 0 }
 
-interface GuideComparison {
+/** @typeParam E what an effect may be: whole ones among editions, unfinished ones too where a draft is compared */
+interface GuideComparison<E extends EffectDraft = Effect> {
   /** Short fields that differ. */
   fields: FieldChange[]
   /** The whole body in order; no entry but `same` ones when it did not change. */
   body: BodyChange[]
-  effects: EffectChange[]
+  effects: EffectChange<E>[]
   effectsReordered: boolean
   sources: SourceChange[]
   counts: ChangeSizes
 }
 
 /** Everything that differs between two states of a guide, in the order in which a page shows it. */
-function compareGuides(before: GuideDraft, after: GuideDraft): GuideComparison {
+function compareGuides<Guide extends GuideDraft>(before: Guide, after: Guide): GuideComparison<Guide['effects'][number]> {
   const newFields = guideTextFields(after)
   const fields = guideTextFields(before).flatMap((old, at) => {
     const fresh = newFields[at]!
@@ -51,7 +53,7 @@ function compareGuides(before: GuideDraft, after: GuideDraft): GuideComparison {
   return { fields, body, effects, effectsReordered, sources, counts: countsOf({ fields, body, effects, sources }) }
 }
 
-function countsOf(changes: Pick<GuideComparison, 'fields' | 'body' | 'effects' | 'sources'>): ChangeSizes {
+function countsOf(changes: Pick<GuideComparison<EffectDraft>, 'fields' | 'body' | 'effects' | 'sources'>): ChangeSizes {
   const changedBlocks = changes.body.flatMap((block) => (block.kind === 'same' ? [] : [block.words]))
   return {
     words: [...changes.fields.map((field) => field.words), ...changedBlocks].reduce((sum, words) => sum + changedWords(words), 0),

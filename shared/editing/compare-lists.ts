@@ -1,16 +1,16 @@
 export { compareEffects, compareSources }
 export type { EffectChange, SourceChange }
 
-import type { Effect } from '../schemas/effect.ts'
+import type { Effect, EffectDraft } from '../schemas/effect.ts'
 import type { Source } from '../schemas/guide-content.ts'
 import { changedEffectKeys, effectIdentity, sameEffect } from './effect-identity.ts'
 
-interface EffectChange {
+interface EffectChange<E extends EffectDraft = Effect> {
   kind: 'added' | 'removed' | 'changed'
-  before?: Effect
-  after?: Effect
+  before?: E
+  after?: E
   /** For `changed`: the parts of the statement that differ. */
-  changedKeys: (keyof Effect)[]
+  changedKeys: (keyof EffectDraft)[]
 }
 
 interface SourceChange {
@@ -20,9 +20,9 @@ interface SourceChange {
 }
 
 /** What was said about the lap before and what is said now; `reordered` when only the order of rows differs. */
-function compareEffects(before: readonly Effect[], after: readonly Effect[]): { changes: EffectChange[]; reordered: boolean } {
+function compareEffects<E extends EffectDraft>(before: readonly E[], after: readonly E[]): { changes: EffectChange<E>[]; reordered: boolean } {
   const { pairs, removed, added } = match(before, after, effectIdentity, sameEffect)
-  const changes: EffectChange[] = [
+  const changes: EffectChange<E>[] = [
     ...pairs
       .map(([old, fresh]) => ({ kind: 'changed' as const, before: old, after: fresh, changedKeys: changedEffectKeys(old, fresh) }))
       .filter((change) => change.changedKeys.length > 0),

@@ -54,7 +54,7 @@ function fieldsToGuide(fields: FormFields): unknown {
     body: text('body').replace(/\r\n?/g, '\n'),
     effects: rowNumbers(fields, 'effects').map((n) => ({
       ...Object.fromEntries(EFFECT_CHOICES.map((key) => [key, text(`effects.${n}.${key}`)])),
-      strength: Number(text(`effects.${n}.strength`)),
+      strength: text(`effects.${n}.strength`) === '' ? '' : Number(text(`effects.${n}.strength`)),
       ...Object.fromEntries(
         Object.entries(EFFECT_TICKS).map(([key, values]) => [
           key,

@@ -7,13 +7,10 @@ type RowAction = { list: List; deed: 'add' } | { list: List; deed: 'remove'; row
 
 const nouns: Record<string, List> = { answer: 'answers', effect: 'effects', source: 'sources' }
 
-/** A new row as the form shows it first. An effect begins with a whole statement, so that the draft can be saved. */
+/** A new row as the form shows it first: nothing is claimed that nobody has written. */
 const fresh: Record<List, FormFields> = {
   answers: { heading: '', text: '' },
-  effects: {
-    adjustable: 'front_diff_fluid', direction: 'up', phase: 'entry', quality: 'steering', change: 'more', strength: '1',
-    mirrors: 'yes', basis: 'common_practice', note: '',
-  },
+  effects: { adjustable: '', direction: '', phase: '', quality: '', change: '', strength: '', basis: '', note: '' },
   sources: { kind: 'common_practice', text: '', url: '' },
 }
 

@@ -70,6 +70,8 @@ interface LapRow {
   key: string
   adjustable: string
   direction: Direction
+  /** “Front diff fluid”, also where `name` leaves it out. */
+  part: string
   /** “Thicker” in a table about one adjustable, “Front diff fluid: thicker” otherwise. */
   name: string
   /** “2,000 cSt at a time”; empty for an adjustable that is not known. */
@@ -115,6 +117,7 @@ function buildRow(
     key: `${key}-${direction}`,
     adjustable: key,
     direction,
+    part: words?.name ?? key,
     name: alone ? capital(way) : `${words?.name ?? key}: ${way}`,
     size: words === undefined ? '' : stepWords(words),
     mirrored: moved.every(({ mirrored }) => mirrored),

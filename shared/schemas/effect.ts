@@ -1,10 +1,11 @@
-export { Effect, ADJUSTABLE_KEY }
+export { Effect, EffectDraft, ADJUSTABLE_KEY, isWholeEffect }
 
 import { z } from 'zod'
 import { BITES, CAR_CLASSES, SURFACES } from '../vocabulary/conditions.ts'
 import { BASES, CHANGES, DIRECTIONS } from '../vocabulary/effect-words.ts'
 import { PHASES } from '../vocabulary/phases.ts'
 import { QUALITIES } from '../vocabulary/qualities.ts'
+import { asTyped } from './as-typed.ts'
 import { optionalText } from './text.ts'
 
 const ADJUSTABLE_KEY = /^[a-z][a-z0-9_]{1,39}$/
@@ -42,3 +43,32 @@ const Effect = z.strictObject({
   note: optionalText('Note', 200),
 })
 type Effect = z.infer<typeof Effect>
+
+/** A choice that may not have been made yet; the empty text says so, as it does in the form. */
+function orOpen<Choice extends z.ZodType>(choice: Choice) {
+  const wrong = choice.safeParse('?').error!.issues[0]!.message
+  return z.union([z.literal(''), choice], { error: wrong }).default('')
+}
+
+/** An effect half filled in: a draft holds it as it is, only sending asks for the rest. */
+const EffectDraft = z.strictObject({
+  adjustable: orOpen(Effect.shape.adjustable),
+  direction: orOpen(Effect.shape.direction),
+  phase: orOpen(Effect.shape.phase),
+  quality: orOpen(Effect.shape.quality),
+  change: orOpen(Effect.shape.change),
+  strength: orOpen(Effect.shape.strength),
+  surfaces: Effect.shape.surfaces,
+  bites: Effect.shape.bites,
+  carClasses: Effect.shape.carClasses,
+  mirrors: Effect.shape.mirrors,
+  basis: orOpen(Effect.shape.basis),
+  note: asTyped('Note'),
+})
+type EffectDraft = z.infer<typeof EffectDraft>
+
+/** Whether every choice of an effect is made, so that it can be shown and read as one. */
+function isWholeEffect(effect: EffectDraft): effect is Effect {
+  const { adjustable, direction, phase, quality, change, strength, basis } = effect
+  return [adjustable, direction, phase, quality, change, strength, basis].every((choice) => choice !== '')
+}

@@ -26,7 +26,7 @@ describe('writing by plain forms', () => {
 
     const added = await post(priya, `/write/${id}`, { ...fields, version: '1', do: 'add-effect' }).expect(303)
     expect(added.headers['location']).toBe(`/write/${id}#effects`)
-    expect((await edit(id)).content).toMatchObject({ body: 'One.\n\nTwo.\n', effects: [WHOLE_GUIDE.effects[0], { adjustable: 'front_diff_fluid' }] })
+    expect((await edit(id)).content).toMatchObject({ body: 'One.\n\nTwo.\n', effects: [WHOLE_GUIDE.effects[0], { adjustable: '', direction: '', strength: '' }] })
 
     await post(priya, `/write/${id}`, { ...guideToFields((await edit(id)).content), version: '2', do: 'remove-effect:1' }).expect(303)
     expect((await edit(id)).content.effects).toEqual(WHOLE_GUIDE.effects)
@@ -98,7 +98,7 @@ describe('deciding by plain forms', () => {
   it('shows the review page again when the reason is missing', async () => {
     const sent = await sentEdit(priya, { guideSlug: 'anti-squat' }, { title: 'Anti-squat, measured' })
     const answer = await post(odile, `/review/${sent.id}/decline`, { version: String(sent.version), reason: '' }).expect(422)
-    expect(answer.text).toContain('Reason: write at least 3 characters.')
+    expect(answer.text).toContain('What should change, or why not? Write at least 3 characters.')
     expect(await edit(sent.id)).toMatchObject({ state: 'in_review' })
   })
 })

@@ -15,7 +15,7 @@ async function read(path: string, agent = app.agent()): Promise<Document> {
 const words = (element: Element | null | undefined) => element?.textContent?.replace(/\s+/g, ' ').trim() ?? ''
 
 describe('a guide page', () => {
-  it('answers in the order of the brief: title, in short, two answers, lap, when and how much, text, who says so', async () => {
+  it('answers from the top down: title, in short, two answers, lap, when and how much, text, who says so', async () => {
     const document = await read('/guides/diff-fluids')
     expect(words(document.querySelector('h1'))).toMatch(/^B1 /)
     const order = ['h1', '.deck', '.ways', '#around-the-lap', '#when-and-how-much', '.read.hang', '#who-says-so', '.g-end']

@@ -21,6 +21,7 @@ const matrix: Record<string, Outcome[]> = {
   '/calculators/@slug': all('open'),
   '/chapters': all('open'),
   '/chapters/@letter': all('open'),
+  '/feel': all('open'),
   '/forgotten': all('open'),
   '/glossary': all('open'),
   '/guides/@slug': all('open'),
@@ -32,6 +33,8 @@ const matrix: Record<string, Outcome[]> = {
   '/mailbox': all('open'),
   '/mailbox/@id': all(404),
   '/members': ['sign-in', 403, 403, 403, 'open'],
+  // A visitor's car is kept by the browser.
+  '/my-car': all('open'),
   '/reset': all('open'),
   '/review': ['sign-in', 403, 403, 'open', 'open'],
   '/review/@id': ['sign-in', 403, 403, 'open', 'open'],

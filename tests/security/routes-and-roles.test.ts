@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import type supertest from 'supertest'
 import { listRoutes } from '../support/list-routes.ts'
@@ -18,6 +19,7 @@ const verified: Outcome[] = [401, 403, 'in', 'in', 'in']
 const admins: Outcome[] = [401, 403, 403, 403, 'in']
 /** Someone else's edit in review: hidden from members, readable for moderators, changed by nobody but its writer. */
 const writerOnly: Outcome[] = [401, 404, 404, 403, 403]
+const hidden: Outcome[] = [401, 404, 404, 404, 404]
 const deskOnly: Outcome[] = [401, 404, 404, 'in', 'in']
 const form = (outcomes: Outcome[]): Outcome[] => outcomes.map((outcome) => (outcome === 401 ? 'sign-in' : outcome))
 
@@ -25,6 +27,8 @@ const matrix: Record<string, Outcome[]> = {
   'GET /healthz': all('in'),
   'GET /readyz': all('in'),
   'GET /api/health': all('in'),
+  'GET /api/openapi.json': all('in'),
+  'GET /api/by-feel': all('in'),
   'GET /robots.txt': all('in'),
   'GET /sitemap.xml': all('in'),
   'GET /{*path}': all('in'),
@@ -51,6 +55,13 @@ const matrix: Record<string, Outcome[]> = {
   'POST /api/edits/:id/decline': deskOnly,
   'POST /api/edits/:id/approve': deskOnly,
   'POST /api/edits/:id/notes': deskOnly,
+  'GET /api/cars': members,
+  'POST /api/cars': members,
+  'POST /api/cars/merge': members,
+  // Someone else's car is not there, for whoever asks.
+  'PUT /api/cars/:id': hidden,
+  'DELETE /api/cars/:id': hidden,
+  'POST /api/cars/:id/choose': hidden,
   'POST /api/members': all('in'),
   'GET /api/members': admins,
   'PUT /api/members/:id/role': admins,
@@ -84,6 +95,11 @@ const matrix: Record<string, Outcome[]> = {
   'POST /write/:id': form(writerOnly),
   'POST /write/:id/withdraw': form(writerOnly),
   'POST /write/:id/rebase': form(deskOnly),
+  'POST /my-car': form(members),
+  'POST /my-car/:id': form(hidden),
+  'POST /my-car/:id/choose': form(hidden),
+  'POST /my-car/:id/copy': form(hidden),
+  'POST /my-car/:id/delete': form(hidden),
   'POST /review/:id/approve': form(deskOnly),
   'POST /review/:id/ask': form(deskOnly),
   'POST /review/:id/decline': form(deskOnly),
@@ -102,6 +118,7 @@ const bodies: Record<string, object> = {
 let app: TestApp
 let editId: string
 let memberId: string
+let carId: string
 let agents: Record<Role, ReturnType<typeof supertest.agent>>
 
 beforeAll(async () => {
@@ -116,6 +133,8 @@ beforeAll(async () => {
     .expect(200)
   // Nobody's client in this table, so that ending his sessions ends none of theirs.
   const me = await writer.get('/api/session').expect(200)
+  carId = randomUUID()
+  await writer.post('/api/cars').send({ id: carId, name: 'His own', values: { mass: 3.6 } }).expect(201)
   memberId = (me.body as { member: { id: string } }).member.id
   agents = {
     visitor: app.agent(),
@@ -179,6 +198,8 @@ async function request(
   const url = path
     .replace('/members/:id', `/members/${memberId}`)
     .replace('/mailbox/:id', '/mailbox/none')
+    .replace('/cars/:id', `/cars/${carId}`)
+    .replace('/my-car/:id', `/my-car/${carId}`)
     .replace(':id', editId)
     .replace('guides/:slug', 'guides/droop')
     .replace(':slug', 'fluid-blend')

@@ -1,4 +1,4 @@
-export { byPart, partNames }
+export { byPart, partLetters, partNames }
 
 import type { CalculatorPart } from '#shared/calculators/definition.ts'
 
@@ -14,9 +14,33 @@ const partNames: Record<CalculatorPart, string> = {
   bench: 'The bench',
 }
 
+/** The chapter of the book about the same part. */
+const partLetters: Record<CalculatorPart, string> = {
+  tyres: 'A',
+  driveline: 'B',
+  'wheel angles': 'C',
+  'springs and shocks': 'D',
+  'ride height and movement': 'E',
+  weight: 'F',
+  'motor and gearing': 'G',
+  bench: 'H',
+}
+
+interface PartGroup<T> {
+  part: CalculatorPart
+  letter: string
+  name: string
+  calculators: T[]
+}
+
 /** Calculators by the part of the car they are about; parts without one are left out. */
-function byPart<T extends { part: CalculatorPart }>(calculators: readonly T[]): { part: CalculatorPart; name: string; calculators: T[] }[] {
+function byPart<T extends { part: CalculatorPart }>(calculators: readonly T[]): PartGroup<T>[] {
   return (Object.keys(partNames) as CalculatorPart[])
-    .map((part) => ({ part, name: partNames[part], calculators: calculators.filter((calculator) => calculator.part === part) }))
+    .map((part) => ({
+      part,
+      letter: partLetters[part],
+      name: partNames[part],
+      calculators: calculators.filter((calculator) => calculator.part === part),
+    }))
     .filter((group) => group.calculators.length > 0)
 }

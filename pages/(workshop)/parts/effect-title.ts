@@ -1,6 +1,6 @@
 export { effectTitle, effectReading }
 
-import type { Effect } from '#shared/schemas/effect.ts'
+import { isWholeEffect, type EffectDraft } from '#shared/schemas/effect.ts'
 import { describeEffect } from '#shared/vocabulary/effect-words.ts'
 import { phases } from '#shared/vocabulary/phases.ts'
 
@@ -12,16 +12,18 @@ interface AdjustableWords {
 }
 
 /** “Front diff fluid thicker, corner exit”: which statement this is, without what it says. */
-function effectTitle(effect: Effect, adjustables: readonly AdjustableWords[]): string {
-  return `${changeOf(effect, adjustables)}, ${phases[effect.phase].name.toLowerCase()}`
+function effectTitle(effect: EffectDraft, adjustables: readonly AdjustableWords[]): string {
+  return [changeOf(effect, adjustables), ...(effect.phase === '' ? [] : [phases[effect.phase].name.toLowerCase()])].join(', ')
 }
 
-/** The whole statement as a reader would say it. */
-function effectReading(effect: Effect, adjustables: readonly AdjustableWords[]): string {
-  return `${changeOf(effect, adjustables)}: ${describeEffect(effect)}`
+/** The whole statement as a reader would say it; of an unfinished one what is chosen so far. */
+function effectReading(effect: EffectDraft, adjustables: readonly AdjustableWords[]): string {
+  return isWholeEffect(effect) ? `${changeOf(effect, adjustables)}: ${describeEffect(effect)}` : `${effectTitle(effect, adjustables)} – not finished yet`
 }
 
-function changeOf({ adjustable, direction }: Effect, adjustables: readonly AdjustableWords[]): string {
+function changeOf({ adjustable, direction }: EffectDraft, adjustables: readonly AdjustableWords[]): string {
+  if (adjustable === '') return 'A new effect'
   const words = adjustables.find(({ key }) => key === adjustable)
-  return words === undefined ? `${adjustable} ${direction}` : `${words.name} ${words[direction]}`
+  const way = direction === '' ? '' : (words?.[direction] ?? direction)
+  return `${words?.name ?? adjustable} ${way}`.trim()
 }

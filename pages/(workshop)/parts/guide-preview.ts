@@ -3,7 +3,7 @@ export type { GuidePreview }
 
 import type { Preview } from '#server/edits/views.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
-import type { GuideDraft } from '#shared/schemas/guide-content.ts'
+import { Source, type GuideDraft } from '#shared/schemas/guide-content.ts'
 import { guidePage, type GuidePage } from '#renderer/guides/guide-page.ts'
 import { exampleSentence, exampleWords } from '#renderer/guides/example-words.ts'
 
@@ -29,7 +29,7 @@ function previewPage(
       ...content,
       ...preview,
       answers: content.answers.filter(({ heading, text }) => heading !== '' || text !== ''),
-      sources: content.sources.filter(({ text }) => text !== ''),
+      sources: content.sources.filter(({ text }) => text !== '').map((source) => ({ ...source, url: webAddress(source.url) })),
       slug: '', mark, chapter: { letter: '', name: '' },
       edition: 0, editions: 0, author: nobody, approver: nobody, contributors: [], publishedAt: '', firstPublishedAt: '',
     },
@@ -46,4 +46,9 @@ function previewPage(
       .map((example) => exampleSentence(exampleWords(example, calculators.get(example.slug)))),
     workedExamples: preview.workedExamples.length,
   }
+}
+
+/** A draft keeps whatever stands in the field; only what would be published becomes a link. */
+function webAddress(url: string): string {
+  return Source.shape.url.safeParse(url).data ?? ''
 }

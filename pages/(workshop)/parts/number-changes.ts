@@ -2,7 +2,9 @@ export { numberChanges }
 export type { NumberedChange, NumberedComparison }
 
 import type { GuideComparison } from '#shared/editing/compare-guides.ts'
+import type { EffectDraft } from '#shared/schemas/effect.ts'
 import { textAfter, textBefore, type Segment } from '#shared/editing/segments.ts'
+import { placeRemarks, type Placed, type Remark } from './place-remarks.ts'
 
 /** One entry in the list of changes; `id` is where it stands on the page. */
 interface NumberedChange {
@@ -12,17 +14,19 @@ interface NumberedChange {
   kind: string
 }
 
+/** Of drafts too, in which an effect may be unfinished. */
+type Comparison = GuideComparison<EffectDraft>
 type Numbered<T> = T & { number: number; id: string }
-type Changed = Exclude<GuideComparison['body'][number], { kind: 'same' }>
-type Same = Extract<GuideComparison['body'][number], { kind: 'same' }>
+type Changed = Exclude<Placed, { kind: 'same' }>
+type Same = Extract<Placed, { kind: 'same' }>
 
 /** A comparison with a number at every change, in the order in which the page shows them. */
 interface NumberedComparison {
-  fields: Numbered<GuideComparison['fields'][number]>[]
+  fields: Numbered<Comparison['fields'][number]>[]
   body: (Same | Numbered<Changed>)[]
-  effects: Numbered<GuideComparison['effects'][number] & { title: string }>[]
+  effects: Numbered<Comparison['effects'][number] & { title: string }>[]
   reordered: Numbered<{ title: string }> | null
-  sources: Numbered<GuideComparison['sources'][number]>[]
+  sources: Numbered<Comparison['sources'][number]>[]
   list: NumberedChange[]
 }
 
@@ -31,10 +35,12 @@ const LONGEST_TITLE = 44
 /**
  * Numbers the changes of a comparison from 1.
  * @param effectTitle the effect in a few words, such as “Front diff fluid thicker, corner exit”
+ * @param remarks what laying the text out has noticed, to be shown where it is
  */
 function numberChanges(
-  changes: GuideComparison,
-  effectTitle: (effect: NonNullable<GuideComparison['effects'][number]['after']>) => string,
+  changes: Comparison,
+  effectTitle: (effect: EffectDraft) => string,
+  remarks: readonly Remark[] = [],
 ): NumberedComparison {
   const list: NumberedChange[] = []
   const next = (title: string, kind: string) => {
@@ -45,10 +51,10 @@ function numberChanges(
   }
   return {
     fields: changes.fields.map((field) => ({ ...field, ...next(field.label, 'Field') })),
-    body: changes.body.map((block) => {
+    body: placeRemarks(changes.body, remarks).map((block) => {
       if (block.kind === 'same') return { ...block, text: block.text.split(/\n{2,}/).map(withoutSoftBreaks).join('\n\n').trim() }
       // A blank line more or less at the end of a paragraph is nothing to decide on.
-      if (isBlankChange(block)) return { kind: 'same', text: textAfter(block.words), blocks: 1, words: 0 }
+      if (isBlankChange(block)) return { kind: 'same', text: textAfter(block.words), blocks: 1, words: 0, remarks: block.remarks }
       return { ...block, ...next(titleOf(block), kindOf(block)), words: asRead(block.words) }
     }),
     effects: changes.effects.map((effect) => {

@@ -20,11 +20,22 @@ describe('EffectsTable', () => {
   it('is a table whose heads name each part of the lap and each change', async () => {
     const { document } = await render([base])
     const heads = [...document.querySelectorAll('thead th[scope=col]')].map((head) => head.textContent?.trim())
-    expect(heads).toEqual(['If you go', '1Corner entry', '2Mid-corner', '3Corner exit', '4Straight', '5Bumps', '6Jumps'])
+    expect(heads).toEqual(['Front diff fluid: if you go', '1Corner entry', '2Mid-corner', '3Corner exit', '4Straight', '5Bumps', '6Jumps'])
     const rows = [...document.querySelectorAll('tbody tr')]
     expect(rows.map((row) => row.querySelector('th[scope=row] .ch-n')?.textContent)).toEqual(['Thicker', 'Thinner'])
     for (const row of rows) expect(row.querySelectorAll('td[role=cell]')).toHaveLength(6)
     expect(document.querySelector('caption')?.textContent).toBe('What it does')
+  })
+
+  it('names the part that a way belongs to, also in a table about one part', async () => {
+    const { document } = await render([base])
+    const names = [...document.querySelectorAll('tbody th[scope=row]')].map((head) => head.textContent!.replace(/\s+/g, ' ').trim())
+    expect(names[0]).toMatch(/^Front diff fluid: Thicker/)
+    expect(names[1]).toMatch(/^Front diff fluid: Thinner/)
+    expect(document.querySelector('.pick legend')?.textContent).toBe('Choose a change: Front diff fluid')
+    const two = await render([base, { ...base, adjustable: 'rear_toe' }])
+    expect([...two.document.querySelectorAll('thead th')][0]!.textContent).toBe('If you go')
+    expect(two.document.querySelector('tbody th .vh')).toBeNull()
   })
 
   it('says every effect in words, hides the drawings from screen readers and names empty cells', async () => {

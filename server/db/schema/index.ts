@@ -1,6 +1,8 @@
 export { glossaryTerms, wantedGuides } from './book.ts'
+export { cars } from './cars.ts'
 export { editNotes, edits, reviews } from './edits.ts'
 export { adjustables, effects } from './effects.ts'
 export { chapters, editions, guides, slugRedirects } from './guides.ts'
+export { firstLooks, heatReports, heatReportTallies } from './heat-reports.ts'
 export { members, sessions, signInTokens } from './people.ts'
 export { auditEntries, idempotencyKeys, outbox, rateLimits } from './records.ts'

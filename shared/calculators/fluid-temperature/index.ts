@@ -48,6 +48,7 @@ const calculator = defineCalculator({
       ladder: siliconeBottles,
       reason: 'there is no silicone fluid thinner or thicker than that to pour',
       help: 'The number on the bottle, in cSt at 25\u00A0°C. Plus and minus step through bottles you can buy.',
+      carKey: { front: 'frontDiffFluid', centre: 'centreDiffFluid', rear: 'rearDiffFluid' },
     },
     degrees(
       'referenceTemperature',
@@ -102,7 +103,7 @@ const calculator = defineCalculator({
   },
   working: temperatureWorking,
   plots: (inputs, outputs) => [temperaturePlot(inputs, outputs)],
-  comparison({ viscosityAt25, referenceTemperature, temperature }, { fluidToMatch }) {
+  comparison({ viscosityAt25, referenceTemperature, temperature }, { fluidToMatch, ratio }) {
     const row = (label: Sentence, at: number) => ({
       label,
       unit: 'cSt' as const,
@@ -110,6 +111,7 @@ const calculator = defineCalculator({
       cells: [viscosityAt(viscosityAt25, at), viscosityAt(fluidToMatch, at)],
     })
     return {
+      says: differenceOnBottle(ratio),
       caption: 'If you change the fluid',
       columns: ['Your fluid', 'Fluid to match'],
       rows: [
@@ -138,6 +140,13 @@ const calculator = defineCalculator({
   ],
   cautions: fluidCautions,
 })
+
+/** What changing to the matching fluid means on the bottle: its number is `1 / ratio` times as large. */
+function differenceOnBottle(ratio: number): Sentence {
+  const share = Math.abs(1 / ratio - 1) * 100
+  if (share < 0.05) return say`Your fluid already feels as it did.`
+  return say`A fluid ${figure(share, '%', share < 1 ? 1 : 2)} ${ratio < 1 ? 'thicker' : 'thinner'} on the bottle feels now as yours did then.`
+}
 
 function change(ratio: number, referenceTemperature: number): Sentence {
   const share = Math.abs(1 - ratio) * 100

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { EffectDraft } from '#shared/schemas/effect.ts'
 import { emptyGuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
 import { beforeSending } from './before-sending.ts'
 
@@ -35,7 +36,15 @@ describe('what is missing before sending', () => {
     expect(missing.map(({ field }) => field)).toEqual(['sources.1.text'])
   })
 
-  it('asks for the one line that the moderator reads first', () => {
+  it('asks for the one line that the moderator reads first, and for no more than a line', () => {
     expect(beforeSending(whole, '  ', nothing)).toMatchObject([{ field: 'summary' }])
+    expect(beforeSending(whole, 'x'.repeat(141), nothing)).toMatchObject([{ field: 'summary' }])
+  })
+
+  it('has one message a field', () => {
+    const missing = beforeSending({ ...emptyGuideContent(), title: `\n${'x'.repeat(91)}\u0007`, effects: [EffectDraft.parse({})] }, '', nothing)
+    const fields = missing.map(({ field }) => field)
+    expect(fields).toEqual([...new Set(fields)])
+    expect(fields).toEqual(expect.arrayContaining(['title', 'inShort', 'body', 'summary', 'effects.0.adjustable', 'effects.0.strength']))
   })
 })

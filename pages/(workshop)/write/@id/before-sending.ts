@@ -2,8 +2,9 @@ export { beforeSending }
 export type { ToDo }
 
 import { config } from 'zod'
-import { GuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
-import { withoutEmptyRows } from '#shared/editing/whole-rows.ts'
+import { guideProblems } from '#shared/editing/guide-problems.ts'
+import { GUIDE_LIMITS, type GuideDraft } from '#shared/schemas/guide-content.ts'
+import { textLength } from '#shared/schemas/text.ts'
 
 /** One thing to mend before a guide can go to the desk: at a field, or at a line of the text. */
 interface ToDo {
@@ -23,27 +24,19 @@ interface Found {
 }
 
 /**
- * What still stands between a draft and the review desk: what the rules of a guide miss, and what laying it out has
- * found. Rows that were opened and left blank do not count: they go when the draft is sent.
+ * What still stands between a draft and the review desk: what the rules of a guide miss, one message a field, and what
+ * laying it out has found, one a line.
  */
 function beforeSending(draft: GuideDraft, summary: string, found: Found): ToDo[] {
-  const checked = GuideContent.safeParse(withoutEmptyRows(draft))
-  const fields = checked.success
-    ? []
-    : checked.error.issues.map(({ message, path }) => ({ message, field: fieldOf(draft, path) }))
   const lines = [
     ...found.problems.map(({ line, message }) => ({ message, line })),
     ...found.missed.map((message) => ({ message, field: 'body' })),
   ]
-  const inOneLine = summary.trim().length >= 3 ? [] : [{ message: 'Say in one line what you changed.', field: 'summary' }]
-  return [...fields, ...lines, ...inOneLine]
+  return [...guideProblems(draft), ...lines, ...summaryProblems(summary)]
 }
 
-/** Where a row stands on the page: blank rows, which the check passes over, are still there. */
-function fieldOf(draft: GuideDraft, path: readonly PropertyKey[]): string {
-  const [list, row, ...rest] = path
-  if ((list !== 'answers' && list !== 'sources') || typeof row !== 'number') return path.join('.')
-  const isBlank = (values: object) => Object.entries(values).every(([key, value]) => key === 'kind' || value === '')
-  const whole = draft[list].flatMap((values, at) => (isBlank(values) ? [] : [at]))
-  return [list, whole[row] ?? row, ...rest].join('.')
+function summaryProblems(summary: string): ToDo[] {
+  const length = textLength(summary.trim())
+  if (length < 3) return [{ message: 'Say in one line what you changed.', field: 'summary' }]
+  return length > GUIDE_LIMITS.summary ? [{ message: `What you changed: keep it under ${GUIDE_LIMITS.summary + 1} characters.`, field: 'summary' }] : []
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { emptyGuideContent, type GuideDraft } from '#shared/schemas/guide-content.ts'
+import { emptyGuideContent, GuideDraft } from '#shared/schemas/guide-content.ts'
 import { draftContent, editableDraft, moveRow, newEffect, sameDraft } from './draft-model.ts'
 
 const effect: GuideDraft['effects'][number] = {
@@ -29,7 +29,7 @@ describe('a draft as the page edits it', () => {
 
   it('numbers rows once, so that moving keeps which is which', () => {
     const draft = editableDraft({ ...guide, effects: [effect, { ...effect, phase: 'exit' }] })
-    draft.effects.push(newEffect(draft.effects, 'front_toe'))
+    draft.effects.push(newEffect(draft.effects))
     moveRow(draft.effects, 2, -1)
     expect(draft.effects.map(({ row }) => row)).toEqual([0, 2, 1])
     moveRow(draft.effects, 0, -1)
@@ -37,9 +37,16 @@ describe('a draft as the page edits it', () => {
     expect(draft.effects.map(({ row }) => row)).toEqual([0, 2, 1])
   })
 
-  it('starts a new effect on the adjustable of the one before', () => {
-    expect(newEffect(editableDraft(guide).effects, 'front_toe')).toMatchObject({ row: 1, adjustable: 'rear_droop', direction: 'down' })
-    expect(newEffect([], 'front_toe')).toMatchObject({ row: 0, adjustable: 'front_toe' })
+  it('starts a new effect without any claim, and keeps it as unfinished as it is', () => {
+    const draft = editableDraft(guide)
+    draft.effects.push(newEffect(draft.effects))
+    const { row, ...added } = draft.effects[1]!
+    expect(row).toBe(1)
+    expect(added).toEqual({
+      adjustable: '', direction: '', phase: '', quality: '', change: '', strength: '', basis: '', note: '',
+      surfaces: [], bites: [], carClasses: [], mirrors: false,
+    })
+    expect(GuideDraft.parse(draftContent(draft)).effects).toEqual([effect, added])
   })
 })
 

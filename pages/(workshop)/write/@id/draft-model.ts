@@ -3,7 +3,7 @@ export type { EditableDraft, Row }
 
 import { GuideDraft, type Source } from '#shared/schemas/guide-content.ts'
 import { withoutEmptyRows } from '#shared/editing/whole-rows.ts'
-import type { Effect } from '#shared/schemas/effect.ts'
+import type { EffectDraft } from '#shared/schemas/effect.ts'
 
 /** A row of a list with a number of its own, so that moving it does not change which fields on the page belong to it. */
 type Row<T> = T & { row: number }
@@ -11,7 +11,7 @@ type Row<T> = T & { row: number }
 /** A draft as the page edits it. */
 interface EditableDraft extends Omit<GuideDraft, 'answers' | 'effects' | 'sources'> {
   answers: Row<GuideDraft['answers'][number]>[]
-  effects: Row<Effect>[]
+  effects: Row<EffectDraft>[]
   sources: Row<Source>[]
 }
 
@@ -42,7 +42,7 @@ function draftContent(draft: EditableDraft): GuideDraft {
   }
 }
 
-function copyEffect(effect: Effect): Effect {
+function copyEffect(effect: EffectDraft): EffectDraft {
   return { ...effect, surfaces: [...effect.surfaces], bites: [...effect.bites], carClasses: [...effect.carClasses] }
 }
 
@@ -57,23 +57,11 @@ function sameDraft(one: GuideDraft, other: GuideDraft): boolean {
   return normal(one) === normal(other)
 }
 
-/** A new row starts as a whole statement, so that a draft with it can always be saved. */
-function newEffect(rows: readonly Row<Effect>[], adjustable: string): Row<Effect> {
-  const last = rows.at(-1)
+/** A new row claims nothing: every choice is still to be made. */
+function newEffect(rows: readonly Row<EffectDraft>[]): Row<EffectDraft> {
   return {
-    row: nextRow(rows),
-    adjustable: last?.adjustable ?? adjustable,
-    direction: last?.direction ?? 'up',
-    phase: 'entry',
-    quality: 'steering',
-    change: 'more',
-    strength: 1,
-    surfaces: [],
-    bites: [],
-    carClasses: [],
-    mirrors: true,
-    basis: 'common_practice',
-    note: '',
+    row: nextRow(rows), adjustable: '', direction: '', phase: '', quality: '', change: '', strength: '',
+    surfaces: [], bites: [], carClasses: [], mirrors: false, basis: '', note: '',
   }
 }
 

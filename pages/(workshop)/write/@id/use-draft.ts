@@ -1,5 +1,5 @@
 export { useDraft }
-export type { DraftDesk, OtherCopy }
+export type { DraftDesk, OtherCopy, WordsState }
 
 import { computed, onBeforeUnmount, onMounted, reactive, ref, shallowRef, watch } from 'vue'
 import { createDeviceCopies } from './device-copy.ts'
@@ -27,6 +27,9 @@ interface Start {
   proposed: boolean
 }
 
+/** Where the newest words are; `unsaved` is a page that came back with words that were refused, or are only proposed. */
+type WordsState = KeeperState | { name: 'unsaved' }
+
 type DraftDesk = ReturnType<typeof useDraft>
 
 /**
@@ -36,7 +39,8 @@ type DraftDesk = ReturnType<typeof useDraft>
 function useDraft({ id, version: startVersion, updatedAt, kept, start, proposed }: Start) {
   const draft = reactive(editableDraft(start.content))
   const summary = ref(start.summary)
-  const state = ref<KeeperState>({ name: 'saved', at: new Date(updatedAt) })
+  const isKept = sameDraft(start.content, kept.content) && start.summary.trim() === kept.summary.trim()
+  const state = ref<WordsState>(isKept ? { name: 'saved', at: new Date(updatedAt) } : { name: 'unsaved' })
   const version = ref(startVersion)
   const other = shallowRef<OtherCopy | null>(null)
   /** The copy that was not gone on with, so that the choice can be taken back. */
@@ -126,7 +130,7 @@ function useDraft({ id, version: startVersion, updatedAt, kept, start, proposed 
       (next) => void follow(next),
     )
     // Words that the club refused a moment ago are newer than anything this device has kept.
-    if (sameDraft(start.content, kept.content) && start.summary === kept.summary) restore()
+    if (isKept) restore()
     watch(newest, (snapshot) => keeper!.typed(snapshot), { immediate: !proposed })
     watch(() => keeper!.wouldLose && state.value.name !== 'saved', warnBeforeLeaving)
     addEventListener('online', backOnline)

@@ -3,6 +3,7 @@ export type { Data }
 
 import { redirect } from 'vike/abort'
 import type { PageContextServer } from 'vike/types'
+import { chosenCar } from '#server/cars/list-cars.ts'
 import { getEdition } from '#server/guides/get-edition.ts'
 import { forPage } from '#server/http/page-abort.ts'
 import { guidePage } from '#renderer/guides/guide-page.ts'
@@ -16,7 +17,7 @@ async function data(pageContext: PageContextServer) {
   if ('movedTo' in edition) throw redirect(`/guides/${edition.movedTo}/editions/${number}`, 301)
   const path = `/guides/${edition.slug}/editions/${number}`
   return {
-    guide: guidePage(ctx, edition, { path, query }),
+    guide: guidePage(ctx, edition, { path, query, car: await chosenCar(ctx) }),
     summary: edition.summary,
     isPublished: edition.isPublished,
     publishedEdition: edition.publishedEdition,

@@ -1,3 +1,0 @@
-import { startIslands } from '#renderer/islands/client.ts'
-
-startIslands()

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'My car · Camber & Clay'

@@ -1,0 +1,3 @@
+import { startIslands } from './client.ts'
+
+startIslands()
