@@ -13,6 +13,7 @@ import { editsApi, editsDescription, editsForms } from './edits/index.ts'
 import { NotFoundError } from './errors.ts'
 import { feelApi, feelDescription } from './feel/index.ts'
 import { guidesApi, guidesDescription } from './guides/index.ts'
+import { heatReportsApi, heatReportsDescription, heatReportsForms } from './heat-reports/index.ts'
 import { formBodies, jsonBodies } from './http/body-parsers.ts'
 import { discovery } from './http/discovery.ts'
 import { health, healthDescription } from './http/health.ts'
@@ -87,7 +88,7 @@ async function createApp(config: Config, options: { clock?: () => Date } = {}): 
   server.use(health(app, readVersion()))
   server.use(sessionMiddleware(app), requestContext(app), refuseCrossSite(config.origin))
   server.use('/api', apiRoutes(app))
-  server.use(formBodies(), sheetChoice({ secure: config.secureCookies }), peopleForms(app), editsForms(app), carsForms(), discovery(app))
+  server.use(formBodies(), sheetChoice({ secure: config.secureCookies }), peopleForms(app), editsForms(app), carsForms(), heatReportsForms(), discovery(app))
   if (config.liveReload) await useLiveReload(server)
   server.get('/{*path}', renderPages())
   server.use(() => {
@@ -114,7 +115,7 @@ function apiRoutes(app: App): Router {
     next()
   })
   router.use(...jsonBodies())
-  router.use(calculatorRoutes(app.calculators), guidesApi(app), editsApi(app), carsApi(app), feelApi(), peopleApi(app))
+  router.use(calculatorRoutes(app.calculators), guidesApi(app), editsApi(app), carsApi(app), feelApi(), heatReportsApi(), peopleApi(app))
   if (app.mailbox !== undefined) router.use(mailboxApi(app))
   router.use(openApi(describeApi(app), { version: readVersion(), sessionCookie: sessionCookieName(app.config.secureCookies) }))
   router.use((req) => {
@@ -132,6 +133,7 @@ function describeApi(app: App): ApiDescription[] {
     editsDescription,
     carsDescription,
     feelDescription,
+    heatReportsDescription,
     peopleDescription,
     ...(app.mailbox === undefined ? [] : [mailboxDescription]),
     healthDescription,

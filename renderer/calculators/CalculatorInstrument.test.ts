@@ -72,7 +72,7 @@ describe('an instrument without a script', () => {
     await serve({ ...heat, values: { viscosityAt25: '10000', temperature: '60' } })
     expect(text('.says')).toContain('Your 10,000 cSt fluid')
     expect((document.querySelector('#heat-link') as HTMLInputElement).value).toBe(
-      '/guides/front-diff-fluid?heat.viscosityAt25=10000&heat.referenceTemperature=25&heat.temperature=60#heat',
+      '/guides/front-diff-fluid?heat.viscosityAt25=10000&heat.referenceTemperature=25&heat.temperature=60&heat.end=front#heat',
     )
   })
 

@@ -3,7 +3,8 @@ import { carValueByKey } from '#shared/cars/car-values.ts'
 import { enteredFor } from '#shared/cars/derived-values.ts'
 import type { CarKey } from '#shared/cars/car-values.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
-import { carKeyOf, endOf, endsOf } from './car-inputs.ts'
+import { endsOf } from '#shared/calculators/ends.ts'
+import { carKeyOf, endOf, fromCar } from './car-inputs.ts'
 
 const definitions = Object.values(
   import.meta.glob<CalculatorDefinition>('../../shared/calculators/*/index.ts', { import: 'calculator', eager: true }),
@@ -26,6 +27,18 @@ describe('what calculators ask a car for', () => {
 
   it('is something, for most calculators', () => {
     expect(new Set(asked.map(({ what }) => what.split('.')[0])).size).toBeGreaterThan(definitions.length / 2)
+  })
+})
+
+describe('what a car says about an input', () => {
+  const input = { carKey: 'mass', min: 0.5, max: 12 } as const
+  const scales = (each: number) => ({ cornerFrontLeft: each, cornerFrontRight: each, cornerRearLeft: each, cornerRearRight: each })
+  const says = (values: object) => fromCar(input, { car: { id: 'c', name: 'Kestrel', values } })
+
+  it('is passed over where it only follows from others and cannot be; what was entered is the reader’s own', () => {
+    expect(says(scales(900))).toBe(3.6)
+    expect(says(scales(5000))).toBeUndefined()
+    expect(says({ mass: 20 })).toBe(20)
   })
 })
 

@@ -1,8 +1,9 @@
-export { carKeyOf, endOf, endsOf, fromCar }
+export { carKeyOf, endOf, fromCar }
 
-import { CAR_ENDS, type CarEnd } from '#shared/cars/car-ends.ts'
+import { endsOf } from '#shared/calculators/ends.ts'
 import { carValue } from '#shared/cars/derived-values.ts'
 import type { CalculatorDefinition, CalculatorInput } from '#shared/calculators/definition.ts'
+import type { CarEnd } from '#shared/cars/car-ends.ts'
 import type { CarKey } from '#shared/cars/car-values.ts'
 import type { InstrumentProps } from './instrument-props.ts'
 
@@ -11,20 +12,19 @@ function carKeyOf({ carKey }: Pick<CalculatorInput, 'carKey'>, end: CarEnd | und
   return typeof carKey === 'object' ? (end === undefined ? undefined : carKey[end]) : carKey
 }
 
-/** What the reader's car says about an input, if anything. */
+/**
+ * What the reader's car says about an input, if anything. What only follows from other values and is out of the input's range
+ * is passed over: nobody typed it, so nobody could put it right here.
+ */
 function fromCar(
-  input: Pick<CalculatorInput, 'carKey'>,
+  input: Pick<CalculatorInput, 'carKey' | 'min' | 'max'>,
   { car, end }: Pick<InstrumentProps, 'car' | 'end'>,
 ): number | undefined {
   const key = carKeyOf(input, end)
-  return key === undefined || car === undefined ? undefined : carValue(car.values, key)
-}
-
-/** The ends that a calculator can be about; none where it is about the whole car. */
-function endsOf(definition: CalculatorDefinition): CarEnd[] {
-  return CAR_ENDS.filter((end) =>
-    definition.inputs.some(({ carKey }) => typeof carKey === 'object' && carKey[end] !== undefined),
-  )
+  if (key === undefined || car === undefined) return undefined
+  const value = carValue(car.values, key)
+  const fits = value === undefined || Object.hasOwn(car.values, key) || (value >= input.min && value <= input.max)
+  return fits ? value : undefined
 }
 
 /** The end an instrument begins with: the address's, else the guide's, else the first that the inputs name. */

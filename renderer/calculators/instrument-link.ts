@@ -1,16 +1,18 @@
 export { keepInAddress, linkOf }
 
 import { linkQuery } from '#shared/calculators/query.ts'
+import type { CarEnd } from '#shared/cars/car-ends.ts'
 import type { CalculatorDefinition } from '#shared/calculators/definition.ts'
 import type { InstrumentProps } from './instrument-props.ts'
 
-/** Where this instrument stands, with these numbers; without numbers, with the guide's. */
+/** Where this instrument stands, with these numbers, about this end of the car; without numbers, with the guide's. */
 function linkOf(
   definition: CalculatorDefinition,
   { action = '', instanceId }: InstrumentProps,
   inputs: Readonly<Record<string, number>> = {},
+  end?: CarEnd,
 ): string {
-  const query = linkQuery(definition, instanceId, inputs)
+  const query = linkQuery(definition, instanceId, inputs, end)
   return `${action}${query === '' ? '' : `?${query}`}#${instanceId}`
 }
 

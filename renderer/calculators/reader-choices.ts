@@ -3,7 +3,7 @@ export { useReaderChoices }
 import { defineStore } from 'pinia'
 import { unitChoicesFrom, type UnitChoices, type UnitGroupKey } from '#shared/units/unit-choices.ts'
 import { chosenKeptCar, KEPT_CARS } from '../cars/kept-cars.ts'
-import { handOverCars, isMembersPage } from '../cars/hand-over.ts'
+import { pageMember } from '../cars/page-member.ts'
 import type { CarKey } from '#shared/cars/car-values.ts'
 import type { CarSheet } from '#shared/cars/car.ts'
 import type { UnitId } from '#shared/units/units.ts'
@@ -44,15 +44,18 @@ const useReaderChoices = defineStore('reader-choices', {
       addEventListener('pageshow', ({ persisted }) => {
         if (persisted) this.takeCar()
       })
-      if (this.car !== undefined && isMembersPage()) void this.handOver()
+      const member = pageMember()
+      if (this.car !== undefined && member !== null) void this.handOver(member)
     },
     takeCar() {
       // What was handed over to an account stays in use on the page.
-      this.car = chosenKeptCar() ?? (isMembersPage() ? this.car : undefined)
+      const member = pageMember()
+      this.car = chosenKeptCar(member) ?? (member === null ? undefined : this.car)
     },
-    async handOver() {
-      const merged = await handOverCars()
-      const chosen = merged?.cars.find((car) => car.chosen)
+    async handOver(member: string) {
+      // Asked for seldom, and it knows every rule of a car.
+      const { handOverCars } = await import('../cars/hand-over.ts')
+      const chosen = (await handOverCars(member))?.find((car) => car.chosen)
       if (chosen !== undefined) this.car = chosen
     },
     /** Tells the other instruments what a value of the car is for now; the car itself keeps its own. */

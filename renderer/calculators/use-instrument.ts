@@ -1,12 +1,13 @@
 export { useInstrument }
 export type { Instrument, InstrumentField }
 
-import { computed, onMounted, reactive, ref, watch } from 'vue'
+import { computed, inject, onMounted, reactive, ref, watch } from 'vue'
 import { checkEach } from '#shared/calculators/check-inputs.ts'
 import { runDefinition, type CalculatorRun } from '#shared/calculators/run-definition.ts'
 import { nextStep } from '#shared/calculators/steps.ts'
 import { typedValue } from '#shared/calculators/typed-inputs.ts'
 import { unitChoicesFrom, unitFor, unitGroupsOf, type UnitGroupKey } from '#shared/units/unit-choices.ts'
+import { typeAgainKey } from '../islands/typed-before.ts'
 import { endOf } from './car-inputs.ts'
 import { fieldText, startField, startValues, type FieldState } from './field-state.ts'
 import { useReaderChoices } from './reader-choices.ts'
@@ -130,7 +131,9 @@ function useInstrument(definition: CalculatorDefinition, props: InstrumentProps)
     }),
   )
 
+  const typeAgain = inject(typeAgainKey, undefined)
   onMounted(() => {
+    typeAgain?.()
     alive.value = true
     store.load()
     myCar.arrive()

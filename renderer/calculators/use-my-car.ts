@@ -1,7 +1,8 @@
 export { useMyCar }
 
 import { computed, ref, watch, type Ref } from 'vue'
-import { carKeyOf, endOf, endsOf, fromCar } from './car-inputs.ts'
+import { endsOf } from '#shared/calculators/ends.ts'
+import { carKeyOf, endOf, fromCar } from './car-inputs.ts'
 import { startValues, type FieldState } from './field-state.ts'
 import { useReaderChoices } from './reader-choices.ts'
 import type { CarEnd } from '#shared/cars/car-ends.ts'

@@ -63,7 +63,9 @@ async function ask(
     if (response.status === 429 || response.status >= 500) {
       return { kind: 'away', retryAfterSeconds: Number(response.headers.get('Retry-After')) || 0 }
     }
-    const { title, errors } = (await response.json()) as { title?: string; errors?: { message: string }[] }
+    const { code, title, errors } = (await response.json()) as { code?: string; title?: string; errors?: { message: string }[] }
+    // The account took it in before, and its answer was lost: what it holds now decides how to go on.
+    if (code === 'car_exists') return { kind: 'stale' }
     return { kind: 'refused', message: errors?.[0]?.message ?? title ?? 'Your account does not take this car as it is.' }
   } catch {
     return { kind: 'away', retryAfterSeconds: 0 }

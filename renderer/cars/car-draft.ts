@@ -1,4 +1,4 @@
-export { draftOf, draftTexts, keepable, readDraft, typeInto }
+export { draftOf, draftTexts, followCar, keepable, readDraft, typeInto }
 export type { CarDraft, DraftReading }
 
 import { carValueByKey, type CarValues, type EnteredCarKey } from '#shared/cars/car-values.ts'
@@ -33,6 +33,25 @@ function draftTexts(values: CarValues, units: UnitChoices): CarDraft['texts'] {
       return entry === undefined ? [] : [[key, carText(entry, value, units)]]
     }),
   )
+}
+
+/**
+ * Takes up what a car has become elsewhere. Fields that the reader has changed, is typing in, or has left half typed keep
+ * their words.
+ * @param before what the fields were filled from
+ */
+function followCar(draft: CarDraft, { before, after, units, typing }: { before: Car; after: Car; units: UnitChoices; typing?: string | undefined }): void {
+  for (const key of new Set([...Object.keys(before.values), ...Object.keys(after.values)]) as Set<EnteredCarKey>) {
+    const own = key === typing || draft.values[key] !== before.values[key] || draft.problems.some((problem) => problem.key === key)
+    if (own || draft.values[key] === after.values[key]) continue
+    const value = after.values[key]
+    if (value === undefined) delete draft.values[key]
+    else draft.values[key] = value
+    const entry = carValueByKey(key)
+    if (entry !== undefined) draft.texts[key] = carText(entry, value, units)
+  }
+  if (draft.name === before.name) draft.name = after.name
+  if (draft.carClass === before.carClass) draft.carClass = after.carClass
 }
 
 /** Takes up what was typed into one field. */

@@ -3,6 +3,7 @@ import type { Car } from '#shared/cars/car.ts'
 import type { CarValues } from '#shared/cars/car-values.ts'
 import type { CarView } from '#shared/schemas/car.ts'
 import type { AccountAnswer } from './account-cars.ts'
+import type { AccountVersion } from './kept-cars.ts'
 import { createCarKeeper, type KeepState, type KeptCar } from './car-keeper.ts'
 
 const car = (values: CarValues, more: Partial<KeptCar> = {}): KeptCar => ({ id: 'a', name: 'Kestrel', carClass: null, version: 1, ...more, values })
@@ -14,7 +15,8 @@ const view = (values: CarValues, version: number): CarView => ({
 function desk(start: KeptCar, { member = true, answers = [] as AccountAnswer[], account = [] as CarView[], full = false } = {}) {
   const asked: string[] = []
   const browser = new Map<string, Car>()
-  const shown: { state?: KeepState; kept?: KeptCar; joined?: boolean } = {}
+  const shown: { state?: KeepState; kept?: KeptCar; instead?: Car | null } = {}
+  const bases = new Map<string, AccountVersion | null>()
   let waiting: (() => void) | undefined
   const answer = async (what: string) => {
     asked.push(what)
@@ -28,7 +30,7 @@ function desk(start: KeptCar, { member = true, answers = [] as AccountAnswer[], 
       save: (sent, version) => answer(`save ${version} ${JSON.stringify(sent.values)}`),
       list: async () => account,
       browser: {
-        put: (each) => !full && Boolean(browser.set(each.id, each)),
+        put: (each, base) => !full && Boolean(browser.set(each.id, each) && bases.set(each.id, base)),
         letGo: (sent) => sent.forEach(({ id, values }) => JSON.stringify(browser.get(id)?.values) === JSON.stringify(values) && browser.delete(id)),
       },
       later(_milliseconds, run) {
@@ -36,13 +38,13 @@ function desk(start: KeptCar, { member = true, answers = [] as AccountAnswer[], 
         return () => (waiting = undefined)
       },
     },
-    { state: (state) => (shown.state = state), kept: (kept, joined) => Object.assign(shown, { kept, joined }) },
+    { state: (state) => (shown.state = state), kept: (kept, instead) => Object.assign(shown, { kept, instead }) },
   )
   const settled = async () => {
     for (let n = 0; n < 8; n += 1) await Promise.resolve()
   }
   return {
-    keeper, asked, browser, shown,
+    keeper, asked, browser, bases, shown,
     async tick() {
       const run = waiting
       waiting = undefined
@@ -110,7 +112,7 @@ describe('a member’s car', () => {
     const it = desk(car({ mass: 3 }), { account: [theirs], answers: [{ kind: 'stale' }, { kind: 'saved', car: view({ mass: 3.6, wheelbase: 325 }, 5) }] })
     it.keeper.typed(car({ mass: 3.6 }))
     await it.tick()
-    expect(it.shown).toMatchObject({ joined: true, kept: { values: { mass: 3.6, wheelbase: 325 } } })
+    expect(it.shown).toMatchObject({ instead: { values: { mass: 3.6 } }, kept: { values: { mass: 3.6, wheelbase: 325 } } })
     await it.tick()
     expect(it.asked.at(-1)).toBe('save 4 {"mass":3.6,"wheelbase":325}')
   })
@@ -135,6 +137,42 @@ describe('a member’s car', () => {
     await it.tick()
     await it.tick()
     expect(it.asked).toEqual(['save 1 {"mass":3.6}', 'create {"mass":3.6}'])
+  })
+
+  it('goes on from its own words where only their answer was lost, whether it was new or not', async () => {
+    const lost = { kind: 'away', retryAfterSeconds: 0 } as const
+    for (const start of [car({}, { version: null }), car({}, { version: 6 })]) {
+      const it = desk(start, { account: [view({ mass: 3 }, 7)], answers: [lost, { kind: 'stale' }, { kind: 'saved', car: view({ mass: 3.6 }, 8) }] })
+      it.keeper.typed(car({ mass: 3 }))
+      await it.tick()
+      it.keeper.typed(car({ mass: 3.6 }))
+      await it.tick()
+      await it.tick()
+      expect(it.asked.at(-1)).toBe('save 7 {"mass":3.6}')
+      expect(it.shown.state).toEqual({ name: 'saved', where: 'account' })
+    }
+  })
+
+  it('stays in the browser with the version it was changed from', async () => {
+    const known = desk(car({ mass: 3 }, { version: 4 }))
+    known.keeper.typed(car({ mass: 3.6 }))
+    await known.tick()
+    expect(known.bases.get('a')).toMatchObject({ version: 4, values: { mass: 3 } })
+    const fresh = desk(car({}, { version: null }))
+    fresh.keeper.typed(car({ mass: 3 }))
+    fresh.keeper.leave()
+    expect(fresh.bases.get('a')).toBeNull()
+    await fresh.tick()
+    fresh.keeper.typed(car({ mass: 3.6 }))
+    fresh.keeper.leave()
+    // The account may have taken the first words in, then they are its first version.
+    expect(fresh.bases.get('a')).toMatchObject({ version: 1, values: { mass: 3 } })
+  })
+
+  it('leaves nothing behind in the browser when nothing was typed', () => {
+    const it = desk(car({}, { version: null }))
+    it.keeper.leave()
+    expect(it.browser.size).toBe(0)
   })
 
   it('says why it is refused', async () => {

@@ -5,6 +5,7 @@ import { sameCar, type Car } from '#shared/cars/car.ts'
 import { checkCar } from '#shared/cars/check-car.ts'
 import type { AccountAnswer } from './account-cars.ts'
 import { joinVersions } from './join-versions.ts'
+import type { AccountVersion } from './kept-cars.ts'
 import type { CarView } from '#shared/schemas/car.ts'
 
 /** A car with what is kept of it; `version` is null while the account has not taken it. */
@@ -28,15 +29,16 @@ interface Ports {
   create(car: Car, leaving: boolean): Promise<AccountAnswer>
   save(car: Car, version: number, leaving: boolean): Promise<AccountAnswer>
   list(): Promise<CarView[] | null>
-  browser: { put(car: Car): boolean; letGo(cars: readonly Car[]): void }
+  /** `base`: what the account held when it was last heard of. */
+  browser: { put(car: Car, base: AccountVersion | null): boolean; letGo(cars: readonly Car[]): void }
   /** @returns a way to call it off */
   later(milliseconds: number, run: () => void): () => void
 }
 
 interface Changed {
   state(state: KeepState): void
-  /** What is kept now; `joined` when values came from elsewhere, for the fields to show. */
-  kept(car: KeptCar, joined: boolean): void
+  /** What is kept now; `instead` of what was typed here, when something came from elsewhere, for the fields to show. */
+  kept(car: KeptCar, instead: Car | null): void
 }
 
 type CarKeeper = ReturnType<typeof createCarKeeper>
@@ -56,6 +58,8 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
   let callOff: (() => void) | undefined
   let tries = 0
   let stuck = false
+  // What was sent and not answered: the account may hold it all the same.
+  let unanswered: Car[] = []
 
   const dirty = () => kept.version === null || !sameCar(kept, newest)
 
@@ -68,9 +72,9 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
   }
 
   function keepInBrowser(): void {
-    if (ports.browser.put(newest)) {
+    if (ports.browser.put(newest, null)) {
       kept = { ...newest, version: null }
-      changed.kept(kept, false)
+      changed.kept(kept, null)
       changed.state({ name: 'saved', where: 'browser' })
     } else changed.state({ name: 'failed', message: NOT_KEPT })
   }
@@ -80,6 +84,7 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
     callOff = undefined
     if (running !== undefined || stuck || !dirty()) return running ?? Promise.resolve()
     const sent = newest
+    unanswered.push(sent)
     changed.state({ name: 'saving' })
     running = (kept.version === null ? ports.create(sent, leaving) : ports.save(sent, kept.version, leaving)).then(async (answer) => {
       running = undefined
@@ -91,8 +96,9 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
   async function take(answer: AccountAnswer, sent: Car): Promise<void> {
     if (answer.kind === 'saved') {
       tries = 0
+      unanswered = []
       kept = answer.car
-      changed.kept(kept, false)
+      changed.kept(kept, null)
       ports.browser.letGo([sent])
       changed.state(dirty() ? { name: 'saving' } : { name: 'saved', where: 'account' })
       if (dirty()) schedule(FIRST_SAVE)
@@ -109,8 +115,14 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
     }
   }
 
+  /** What the account held when it was last heard of; a car whose only answer was lost is its first version there. */
+  function base(): AccountVersion | null {
+    if (kept.version !== null) return { ...kept, version: kept.version }
+    return unanswered[0] === undefined ? null : { ...unanswered[0], version: 1 }
+  }
+
   function waitForAccount(why: 'away' | 'signed_out', retryAfterSeconds: number): void {
-    const held = ports.browser.put(newest)
+    const held = ports.browser.put(newest, base())
     changed.state(held ? { name: 'browser_only', why } : { name: 'failed', message: 'your account cannot be reached, and this browser does not keep anything. Keep this page open.' })
     const wait = RETRIES[Math.min(tries, RETRIES.length - 1)]!
     tries += 1
@@ -123,22 +135,32 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
       waitForAccount('away', 0)
       return
     }
-    const { values, disputed } = joinVersions(kept.values, newest.values, theirs.values)
+    // One's own words whose answer was lost are nobody else's change.
+    const from = unanswered.find((sent) => sameCar(sent, theirs)) ?? kept
+    const { values, disputed } = joinVersions(from.values, newest.values, theirs.values)
     if (disputed.length > 0 || checkCar(values).length > 0) {
-      stuck = true
-      changed.state({ name: 'disputed', theirs })
+      dispute(theirs)
       return
     }
-    const name = newest.name === kept.name ? theirs.name : newest.name
-    const carClass = newest.carClass === kept.carClass ? theirs.carClass : newest.carClass
+    const name = newest.name === from.name ? theirs.name : newest.name
+    const carClass = newest.carClass === from.carClass ? theirs.carClass : newest.carClass
     goOn(theirs, { ...newest, name, carClass, values })
   }
 
+  function dispute(theirs: CarView): void {
+    stuck = true
+    callOff?.()
+    callOff = undefined
+    changed.state({ name: 'disputed', theirs })
+  }
+
   function goOn(theirs: CarView, chosen: Car): void {
+    const instead = newest
     stuck = false
+    unanswered = []
     kept = theirs
     newest = chosen
-    changed.kept({ ...chosen, version: theirs.version }, true)
+    changed.kept({ ...chosen, version: theirs.version }, instead)
     if (dirty()) schedule(0)
     else changed.state({ name: 'saved', where: 'account' })
   }
@@ -165,6 +187,15 @@ function createCarKeeper(start: KeptCar, ports: Ports, changed: Changed) {
     async flush(leaving = false): Promise<void> {
       if (!ports.member || callOff === undefined) return running
       await push(leaving)
+    },
+    /** Keeps in the browser what the account may not hear of before the page is gone. */
+    leave(): void {
+      if (ports.member && newest !== start && (dirty() || stuck)) ports.browser.put(newest, base())
+    },
+    /** What stands here was made from a version that nobody knows any more: the reader says what counts. */
+    ask(theirs: CarView): void {
+      kept = { ...theirs, version: null }
+      dispute(theirs)
     },
     /** The answer to a dispute. */
     settle(theirs: CarView, side: 'mine' | 'theirs'): void {

@@ -1,5 +1,5 @@
 export { carSections, countFilled, startKeys, valueId }
-export type { CarSection, CarSectionRow }
+export type { CalculatorName, CarSection, CarSectionRow }
 
 import { carEndNames } from '#shared/cars/car-ends.ts'
 import { carGroups, carValueByKey, carValues, type CarGroup, type CarValue, type EnteredCarKey } from '#shared/cars/car-values.ts'
@@ -11,6 +11,12 @@ interface CarSectionRow {
   label: string
   help: string
   fields: { entry: Entry; name: string }[]
+}
+
+/** A calculator as a value of the car names it. */
+interface CalculatorName {
+  slug: string
+  title: string
 }
 
 interface CarSection {

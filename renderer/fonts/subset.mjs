@@ -2,8 +2,8 @@
 // Run after changing a font or the character set: `npm install --no-save subset-font fontverter && node renderer/fonts/subset.mjs`.
 //
 // Nearly half of a Merriweather file is its kerning table, and that table grows with the square of the number of characters.
-// So the letters, which need kerning, stand in one file, and the signs, which do not, in another that a page without
-// them never loads. Every other character still comes from the full file (styles/fonts.css, unicode-range).
+// So the letters, which need kerning, stand in one file, and figures and signs, which do not, in another. What hardly a page
+// needs has a file for itself; every other character still comes from the full file (styles/fonts.css, unicode-range).
 //
 // Both fonts keep their names reserved under the SIL Open Font License, so what is changed here goes by other names: Camber Read
 // and Camber Work. The licences stand beside the files.
@@ -16,10 +16,9 @@ const source = new URL('../../node_modules/@fontsource-variable/', import.meta.u
 const here = new URL('./', import.meta.url)
 
 const lower = 'abcdefghijklmnopqrstuvwxyz'
-const letters = `${lower}${lower.toUpperCase()}0123456789 \u00a0.,-?&’`
-const ascii = Array.from({ length: 95 }, (_, offset) => String.fromCharCode(32 + offset)).join('')
-const all = `${ascii}\u00a0·×°±²³µ½é–—‘’“”…−`
-const signs = [...all].filter((character) => !letters.includes(character)).join('')
+const letters = `${lower}${lower.toUpperCase()} \u00a0.,-?&’`
+const signs = '0123456789!"%\'()+/:;=_°²³·½×–—‘“”…−'
+const rare = '#$*<>@[\\]^`{|}~§±µ¼¾äéöü'
 
 const merriweather = 'merriweather/files/merriweather-latin-opsz-normal.woff2'
 const merriweatherItalic = 'merriweather/files/merriweather-latin-opsz-italic.woff2'
@@ -36,8 +35,10 @@ const files = [
   { name: 'camber-read-text-signs', from: merriweather, characters: signs, axes: text, features: [] },
   { name: 'camber-read-sign', from: merriweather, characters: letters, axes: sign, features: ['kern'] },
   { name: 'camber-read-sign-signs', from: merriweather, characters: signs, axes: sign, features: [] },
-  { name: 'camber-read-italic', from: merriweatherItalic, characters: all, axes: text, features: [] },
-  { name: 'camber-work', from: encodeSans, characters: all, axes: work, features: figures },
+  { name: 'camber-read-italic', from: merriweatherItalic, characters: letters + signs + rare, axes: text, features: [] },
+  { name: 'camber-read-rare', from: merriweather, characters: rare, axes: text, features: [] },
+  { name: 'camber-work', from: encodeSans, characters: `${letters}${signs}äéöü`, axes: work, features: figures },
+  { name: 'camber-work-rare', from: encodeSans, characters: rare, axes: work, features: figures },
 ]
 
 for (const { name, from, characters, axes, features } of files) {

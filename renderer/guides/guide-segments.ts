@@ -74,6 +74,7 @@ function guideSegments(body: GuideBody, { calculators, path, query, car }: Surro
           props: {
             slug: segment.slug, instanceId, action: path, headingLevel: 3, values: parametersFor(query, instanceId),
             ...(Object.keys(segment.preset).length > 0 ? { preset: segment.preset } : {}),
+            ...(segment.end && { end: segment.end }),
             ...(car && { car }),
           },
         }]

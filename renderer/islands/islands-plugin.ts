@@ -12,6 +12,9 @@ const STARTING = /\/renderer\/islands\/(start|client)\.ts$/
 /** A calculator's own files: who uses one need not carry the others. */
 const ONE_CALCULATOR = /\/shared\/calculators\/(?!common\/)[^/]+\//
 
+/** Asked for by `import()` where it is needed: drawings by the calculators that draw, the rest when the reader does something. */
+const LATER = /\/renderer\/(calculators\/(DrawingFigure|DrawingHandles|place-drawing|keep-apart|move-handle|working-text)|cars\/(hand-over|account-cars))\b/
+
 /**
  * Builds the islands apart from the pages. In one build with the pages that are worked in, they would share those pages' Vue,
  * with the directives and helpers of every form: 5 kB more for each reader of a calculator, who never sees a form.
@@ -65,7 +68,7 @@ async function buildIslands(script: string, plugins: PluginOption[]): Promise<Fi
           comments: false,
           entryFileNames: 'assets/islands/[name].[hash].js',
           chunkFileNames: 'assets/islands/[name].[hash].js',
-          codeSplitting: { groups: [{ name: 'instrument', test: (id) => !STARTING.test(id) && !ONE_CALCULATOR.test(id) }] },
+          codeSplitting: { groups: [{ name: 'instrument', test: (id) => !STARTING.test(id) && !ONE_CALCULATOR.test(id) && !LATER.test(id) }] },
         },
       },
     },

@@ -2,7 +2,7 @@ export { mountIsland }
 
 import { createPinia, type Pinia } from 'pinia'
 import { loadIsland, type IslandProps } from './registry.ts'
-import { typedBefore } from './typed-before.ts'
+import { typeAgainKey, typedBefore } from './typed-before.ts'
 
 let pinia: Pinia | undefined
 
@@ -14,6 +14,7 @@ async function mountIsland(element: HTMLElement): Promise<void> {
   const app = await createIslandApp(JSON.parse(props) as IslandProps, pinia)
   app.config.idPrefix = prefix
   const typeAgain = typedBefore(element)
+  app.provide(typeAgainKey, typeAgain)
   app.mount(element)
   typeAgain()
 }

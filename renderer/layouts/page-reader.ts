@@ -7,6 +7,7 @@ import { roleAtLeast, type MemberRole } from '#shared/vocabulary/roles.ts'
 
 /** The signed-in member as a layout needs to know them. */
 interface PageReader {
+  id: string
   name: string
   role: MemberRole
   /** Edits waiting at the review desk. */
@@ -32,7 +33,7 @@ const places = [
 ]
 
 /** The places this reader may go to, in their fixed order; the review desk only for who can decide there. */
-function placesFor(reader: PageReader | null, path: string): Place[] {
+function placesFor(reader: Omit<PageReader, 'id'> | null, path: string): Place[] {
   const shown: Place[] = places.map((place) => ({ ...place, current: standsIn(place.href, path) }))
   if (reader !== null && roleAtLeast(reader.role, 'moderator')) {
     const waiting = reader.waiting ?? 0

@@ -2,9 +2,9 @@ export { carsApi }
 
 import { Router, type Request, type Response } from 'express'
 import type { App } from '../context.ts'
-import { versionFromIfMatch } from '../edits/if-match.ts'
 import { ValidationError } from '../errors.ts'
 import { idempotent } from '../http/idempotency.ts'
+import { sendVersion, versionFromIfMatch } from '../http/if-match.ts'
 import { requirePermission } from '../people/permissions.ts'
 import type { CarView } from '#shared/schemas/car.ts'
 import { ownCar } from './car-rows.ts'
@@ -48,7 +48,7 @@ function carsApi(app: App): Router {
 }
 
 function sendCar(res: Response, car: CarView): void {
-  res.setHeader('ETag', `"${car.version}"`)
+  sendVersion(res, car)
   res.json(car)
 }
 

@@ -5,7 +5,7 @@ import { and, asc, eq } from 'drizzle-orm'
 import type { ServiceContext, SignedIn } from '../context.ts'
 import { cars, members } from '../db/schema/index.ts'
 import { NotFoundError } from '../errors.ts'
-import { isUuid } from '../edits/edit-row.ts'
+import { isUuid } from '../http/uuid.ts'
 import type { CarView } from '#shared/schemas/car.ts'
 
 type CarRow = typeof cars.$inferSelect

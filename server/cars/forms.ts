@@ -1,10 +1,10 @@
 export { carsForms }
 
 import { Router, type Request, type Response } from 'express'
-import { flatFields, formVersion } from '../edits/form-body.ts'
-import { AppError, isAppError, NotFoundError, ValidationError } from '../errors.ts'
-import { answerWithForm } from '../http/forms.ts'
-import { isUuid } from '../edits/edit-row.ts'
+import { NotFoundError, ValidationError } from '../errors.ts'
+import { answerForm } from '../http/answer-form.ts'
+import { flatFields, formVersion } from '../http/form-body.ts'
+import { isUuid } from '../http/uuid.ts'
 import { requirePermission } from '../people/permissions.ts'
 import { freeName } from '#shared/cars/car.ts'
 import { readCarTexts } from '#shared/cars/read-car.ts'
@@ -16,7 +16,6 @@ import { deleteCar } from './delete-car.ts'
 import { listCars } from './list-cars.ts'
 import { saveCar } from './save-car.ts'
 
-const shownAtTheForm = new Set([409, 412, 422, 429, 503])
 const VALUE = 'value.'
 
 /** The forms of “My car”, for members whose browser runs no script. */
@@ -95,26 +94,9 @@ function valuesFrom(fields: Record<string, string>) {
   )
 }
 
-/**
- * Does what the form asks, or shows it again with what was typed. Where the car was changed meanwhile the form gets the new
- * version, so that sending once more is a decision and not a dead end.
- */
+/** In the form a value is called `value.mass`; which car the form is about goes with it, for the page to show it there only. */
 async function answer(req: Request, res: Response, url: string, act: () => Promise<string>): Promise<void> {
-  let next: string
-  try {
-    next = await act()
-  } catch (error) {
-    if (!isAppError(error) || !shownAtTheForm.has(error.status)) throw error
-    const { version } = error.details
-    const again: Record<string, string> = error.status === 412 && typeof version === 'number' ? { version: String(version) } : {}
-    await answerWithForm(req, res, { url, error: atTheFields(error), values: { ...flatFields(req.body), ...again } })
-    return
-  }
-  res.redirect(303, next)
-}
-
-/** The same error with the names that the fields have in the form: `value.mass` for `values.mass`. */
-function atTheFields(error: AppError): AppError {
-  const fields = error.fields.map(({ field, message }) => ({ field: field.replace(/^values\./, VALUE), message }))
-  return new AppError(error.code, error.status, error.message, { fields, details: error.details, cause: error })
+  const { id } = req.params
+  const values = () => ({ ...flatFields(req.body), ...(typeof id === 'string' && { id }) })
+  await answerForm(req, res, { url, values, fieldName: (field) => field.replace(/^values\./, VALUE) }, act)
 }

@@ -43,9 +43,9 @@ async function mergeIntoAccount(ctx: ServiceContext, input: z.input<typeof CarsT
   })
 }
 
-/** The same for the same car with the same values, whenever it comes; shaped as a UUID of version 8 (RFC 9562). */
-function copyId({ id, carClass, values }: Car): string {
+/** The same for the same car with the same values and name, whenever it comes; shaped as a UUID of version 8 (RFC 9562). */
+function copyId({ id, name, carClass, values }: Car): string {
   const entries = Object.entries(values).sort(([one], [other]) => (one < other ? -1 : 1))
-  const hex = createHash('sha256').update(JSON.stringify([id, carClass, entries])).digest('hex')
+  const hex = createHash('sha256').update(JSON.stringify([id, name, carClass, entries])).digest('hex')
   return `${hex.slice(0, 8)}-${hex.slice(8, 12)}-8${hex.slice(13, 16)}-a${hex.slice(17, 20)}-${hex.slice(20, 32)}`
 }

@@ -1,4 +1,4 @@
-export { entryOf, findEdit, isUuid, listEditRows }
+export { entryOf, findEdit, listEditRows }
 export type { EditRow }
 
 import { eq, sql, type SQL } from 'drizzle-orm'
@@ -6,6 +6,7 @@ import { alias } from 'drizzle-orm/pg-core'
 import type { ServiceContext } from '../context.ts'
 import { chapters, editions, edits, guides, members, reviews } from '../db/schema/index.ts'
 import { markOf, titleOf } from '../guides/edition-columns.ts'
+import { isUuid } from '../http/uuid.ts'
 import type { EditEntry } from './views.ts'
 
 const authors = alias(members, 'authors')
@@ -71,10 +72,6 @@ function selectEdits(ctx: Pick<ServiceContext, 'db'>, { text }: { text: boolean 
     .leftJoin(bases, eq(bases.id, edits.baseEditionId))
     .innerJoin(chapters, eq(chapters.letter, sql`coalesce(${guides.chapter}, ${edits.chapter})`))
     .$dynamic()
-}
-
-function isUuid(text: string): boolean {
-  return /^[0-9a-f]{8}-(?:[0-9a-f]{4}-){3}[0-9a-f]{12}$/i.test(text)
 }
 
 function entryOf(row: ListedRow): EditEntry {

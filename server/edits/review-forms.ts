@@ -2,14 +2,14 @@ export { reviewForms }
 
 import { Router, type Request } from 'express'
 import { NotFoundError } from '../errors.ts'
+import { flatFields, formVersion } from '../http/form-body.ts'
+import { isUuid } from '../http/uuid.ts'
 import type { FormFields } from '#shared/editing/form-fields.ts'
 import { addNote } from './add-note.ts'
 import { answerEditForm } from './answer-form.ts'
 import { approveEdit } from './approve-edit.ts'
 import { askForChanges } from './ask-for-changes.ts'
 import { declineEdit } from './decline-edit.ts'
-import { isUuid } from './edit-row.ts'
-import { flatFields, formVersion } from './form-body.ts'
 import { rebaseEdit } from './rebase-edit.ts'
 
 type Deed = (req: Request, id: string, fields: FormFields) => Promise<string>

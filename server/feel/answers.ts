@@ -55,7 +55,7 @@ function byFeelAnswer({ changes, more, query }: FeelAnswer): z.output<typeof ByF
 }
 
 function changeAnswer(change: FeelChange, available: number | undefined): z.output<typeof FeelChangeAnswer> {
-  const { adjustable, direction, words, score, help, cost, trust, minutes, reports, sure, terms, evidence } = change
+  const { adjustable, direction, words, score, help, cost, trust, minutes, reports, sure, terms, evidence, guide } = change
   return {
     adjustable, direction, score, help, cost, trust, minutes, reports, sure, terms,
     name: words.name,
@@ -64,10 +64,10 @@ function changeAnswer(change: FeelChange, available: number | undefined): z.outp
     unit: words.unit,
     fits: available === undefined || minutes <= available,
     tools: words.tools,
-    guide: words.guide ?? evidence[0]?.guide.slug ?? null,
-    because: evidence.map(({ effect, change: does, mirrored, fit, guide }) => {
+    guide,
+    because: evidence.map(({ effect, change: does, mirrored, fit, guide: from }) => {
       const { phase, quality, strength, surfaces, bites, carClasses, mirrors, basis, note } = effect
-      return { phase, quality, change: does, strength, surfaces, bites, carClasses, mirrors, basis, note, mirrored, fit, guide }
+      return { phase, quality, change: does, strength, surfaces, bites, carClasses, mirrors, basis, note, mirrored, fit, guide: from }
     }),
   }
 }

@@ -6,7 +6,7 @@ import { listAdjustables, type AdjustableView } from '../effects/index.ts'
 import type { FeelQuery } from '#shared/feel/feel-query.ts'
 import { rankChanges, type RankedChange } from '#shared/feel/rank-changes.ts'
 import { agreeing, reportCount, sureOf, type Sureness } from '#shared/feel/trust.ts'
-import { oppositeOf } from '#shared/effects/with-opposites.ts'
+import type { Effect } from '#shared/schemas/effect.ts'
 import type { Change } from '#shared/vocabulary/effect-words.ts'
 import { countReports } from './count-reports.ts'
 import { listEvidence, type EvidenceRow } from './list-evidence.ts'
@@ -21,6 +21,10 @@ type FeelChange = RankedChange & {
   agree: number
   reported: number
   evidence: FeelEvidence[]
+  /** All that the guides say of the adjustable and that fits, for its lap line: what costs and helps nothing is in it too. */
+  effects: Effect[]
+  /** Where to read on: the guide about the adjustable, else the one whose effect weighs most here. */
+  guide: string | null
 }
 
 interface FeelAnswer {
@@ -50,27 +54,31 @@ async function askByFeel(ctx: Pick<ServiceContext, 'db'>, query: FeelQuery): Pro
     changes: listed.flatMap((change) => {
       const own = words.get(change.adjustable)
       if (own === undefined) return []
+      const told = evidenceFor(change, evidence.get(change.adjustable) ?? [])
       return [{
         ...change,
         words: own,
+        guide: own.guide ?? told[0]?.guide.slug ?? null,
         sure: sureOf(change.reports),
         agree: agreeing(change.reports),
         reported: reportCount(change.reports),
-        evidence: evidenceFor(change, evidence.get(change.adjustable) ?? []),
+        evidence: told,
+        effects: (evidence.get(change.adjustable) ?? []).map(({ effect }) => effect),
       }]
     }),
   }
 }
 
-/** The effects behind one change: those stated for its direction, and the mirrored ones that its terms count. */
+/** The effects behind the terms of one change, as they count there. */
 function evidenceFor(change: RankedChange, rows: readonly EvidenceRow[]): FeelEvidence[] {
   return rows.flatMap((row): FeelEvidence[] => {
     const { effect } = row
-    if (effect.direction === change.direction) return [{ ...row, change: effect.change, mirrored: false }]
+    const mirrored = effect.direction !== change.direction
+    if (mirrored && !effect.mirrors) return []
+    const does: Change = mirrored ? (effect.change === 'more' ? 'less' : 'more') : effect.change
     const counted = change.terms.some(
-      ({ mirrored, phase, quality }) => mirrored && phase === effect.phase && quality === effect.quality,
+      (term) => term.mirrored === mirrored && term.phase === effect.phase && term.quality === effect.quality && term.change === does,
     )
-    if (!counted || oppositeOf[effect.direction] !== change.direction) return []
-    return [{ ...row, change: effect.change === 'more' ? 'less' : 'more', mirrored: true }]
+    return counted ? [{ ...row, change: does, mirrored }] : []
   })
 }

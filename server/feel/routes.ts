@@ -24,7 +24,10 @@ function feelApi(): Router {
     if (query.complaints.length === 0 && problems.length === 0) {
       problems.push({ field: 'complaint', message: 'Say what the car does, such as complaint=entry.steering.more.' })
     }
-    if (problems.length > 0) throw new ValidationError('This cannot be answered as it stands.', problems)
+    if (problems.length > 0) {
+      const fields = problems.map(({ field, message, known }) => ({ field, message: known === undefined ? message : `${message} Known are: ${known.join(', ')}.` }))
+      throw new ValidationError('This cannot be answered as it stands.', fields)
+    }
     res.json(byFeelAnswer(await askByFeel(req.ctx, query)))
   })
   return router

@@ -8,6 +8,7 @@ import type { Heading } from '../rendering/index.ts'
 import { Effect } from '#shared/schemas/effect.ts'
 import { GuideContent } from '#shared/schemas/guide-content.ts'
 import type { RenderedPart } from '#shared/rendering/parts.ts'
+import { CAR_ENDS } from '#shared/cars/car-ends.ts'
 import { AXLES } from '#shared/vocabulary/axles.ts'
 
 /** What the API answers about the book; the services' types are read from these schemas, or checked against them. */
@@ -58,7 +59,7 @@ const HeadingAnswer = z.object({ level: z.int(), id: z.string(), text: z.string(
 const numbers = z.record(z.string(), z.number())
 
 const PartAnswer = z.discriminatedUnion('kind', [
-  z.object({ n: z.int(), kind: z.literal('calculator'), slug: z.string(), preset: numbers }),
+  z.object({ n: z.int(), kind: z.literal('calculator'), slug: z.string(), preset: numbers, end: z.enum(CAR_ENDS).optional() }),
   z.object({ n: z.int(), kind: z.literal('effects'), adjustable: z.string() }),
   z.object({
     n: z.int(),

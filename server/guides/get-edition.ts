@@ -23,7 +23,7 @@ async function getEdition(
     if (moved !== null) return moved
     throw new NotFoundError('edition', `${which.slug} ${which.number}`)
   }
-  const view = await editionView(ctx, row)
+  const view = await editionView(ctx, row, row.content.effects)
   return { ...view, isPublished: row.editionId === row.publishedEditionId, publishedEdition: row.publishedEdition }
 }
 

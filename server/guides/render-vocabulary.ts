@@ -4,6 +4,7 @@ import type { CalculatorRegistry } from '../calculators/load-registry.ts'
 import type { Database } from '../db/client.ts'
 import { adjustables, glossaryTerms } from '../db/schema/index.ts'
 import type { RenderVocabulary } from '../rendering/index.ts'
+import { endsOf } from '#shared/calculators/ends.ts'
 import { unitById } from '#shared/units/units.ts'
 
 /** Everything a guide's body may refer to, as plain data for the rendering threads. */
@@ -16,6 +17,7 @@ async function loadRenderVocabulary(db: Database, calculators: CalculatorRegistr
       title,
       inputs: inputs.map(({ key, min, max, unit }) => ({ key, min, max, unit: unitById(unit).written })),
       outputs: outputs.map(({ key, unit }) => ({ key, unit: unitById(unit).written })),
+      ends: endsOf({ inputs }),
     })),
     glossary: Object.fromEntries(terms.map(({ key, term, short }) => [key, { term, short }])),
     adjustables: keys.map(({ key }) => key),

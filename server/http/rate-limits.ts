@@ -26,6 +26,7 @@ const RATE_LIMITS = {
   password_change: { points: 10, seconds: 15 * MINUTE, what: 'Too many wrong passwords' },
   write: { points: 60, seconds: 10 * MINUTE, what: 'You are saving faster than we can keep up' },
   car: { points: 300, seconds: 10 * MINUTE, what: 'You are saving your car faster than we can keep up' },
+  heat_report: { points: 30, seconds: HOUR, what: 'You have sent many reports within the hour' },
   preview: { points: 60, seconds: 10 * MINUTE, what: 'Too many previews' },
   send: { points: 10, seconds: HOUR, what: 'You have sent many edits within the hour' },
 } as const

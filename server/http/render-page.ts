@@ -57,8 +57,11 @@ async function renderBookPage(req: Request, res: Response, options: RenderOption
     query: Object.fromEntries(Object.entries(req.query).filter((pair): pair is [string, string] => typeof pair[1] === 'string')),
   })
   const { httpResponse } = pageContext
-  if (pageContext.errorWhileRendering) {
+  // A page that is not there, or not for this reader, is an answer and no failure.
+  if (pageContext.errorWhileRendering && httpResponse.statusCode >= 500) {
     ctx.log.error({ err: pageContext.errorWhileRendering as unknown, path: req.path }, 'page failed')
+  } else if (pageContext.errorWhileRendering) {
+    ctx.log.info({ status: httpResponse.statusCode, path: req.path }, 'page refused')
   }
   const asAsked = httpResponse.statusCode === 200 || options.url === ERROR_PAGE
   const status = options.status !== undefined && asAsked ? options.status : httpResponse.statusCode

@@ -30,6 +30,11 @@ const permissions = {
   'queue.read': (actor: Actor) => isModerator(actor),
   // One's own and nobody else's: the services look for a car only among those of who asks.
   'car.keep': (actor: Actor) => isMember(actor),
+  'report.save': (actor: Actor) => isVerified(actor),
+  // One's own and nobody else's, as with cars.
+  'report.own': (actor: Actor) => isMember(actor),
+  'report.oversee': (actor: Actor) => isModerator(actor),
+  'report.set_aside': (actor: Actor, report: { memberId: string }) => isModerator(actor) && actor.id !== report.memberId,
   'member.list': (actor: Actor) => isAdmin(actor),
   'member.change_role': (actor: Actor) => isAdmin(actor),
   'member.suspend': (actor: Actor) => isAdmin(actor),
@@ -76,6 +81,10 @@ const refusals: Record<Permission, { toDo: string; why: string }> = {
   'preview.render': { toDo: 'see a preview', why: 'You cannot write yet.' },
   'queue.read': { toDo: 'open the review desk', why: 'The review desk is for moderators.' },
   'car.keep': { toDo: 'keep a car in your account', why: 'You cannot keep a car.' },
+  'report.save': { toDo: 'say how it went', why: 'You cannot report yet.' },
+  'report.own': { toDo: 'see your reports', why: 'You have no reports.' },
+  'report.oversee': { toDo: 'look through heat reports', why: 'The list of heat reports is for moderators.' },
+  'report.set_aside': { toDo: 'set reports aside', why: 'Moderators set reports aside, and nobody decides on their own.' },
   'member.list': { toDo: 'see the members', why: 'The list of members is for admins.' },
   'member.change_role': { toDo: 'change roles', why: 'Admins give out roles.' },
   'member.suspend': { toDo: 'suspend members', why: 'Admins suspend members and sign them out.' },

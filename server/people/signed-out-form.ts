@@ -6,7 +6,7 @@ import { renderBookPage } from '../http/render-page.ts'
 
 // What people write, of all that the forms hold; never a password, and nothing that a tick or a choice can bring back.
 const WRITTEN =
-  /^(?:title|inShort|body|summary|reason|text|note|bench\.\w+|answers\.\d+\.(?:heading|text)|effects\.\d+\.note|sources\.\d+\.(?:text|url))$/
+  /^(?:title|inShort|body|summary|reason|text|note|bench\.\w+|answers\.\d+\.(?:heading|text)|effects\.\d+\.note|sources\.\d+\.(?:text|url)|name|value\.\w+)$/
 
 /**
  * Answers a form that was posted after the session ended: the sign-in page (401) that also shows what was typed, to be

@@ -65,13 +65,13 @@ test('a caution of an unknown kind is still a caution', () => {
 test('calculators, worked examples and lap lines become placeholders with their values', () => {
   const { html, parts, problems } = render([
     'a', '', '::effects{adjustable=front_diff_fluid}',
-    '::calculator{slug=fluid-temperature viscosityAt25=7000 temperature=55}', '', 'b', '',
+    '::calculator{slug=fluid-temperature viscosityAt25=7000 temperature=55 end=front}', '', 'b', '',
     '::worked{calculator=fluid-temperature viscosityAt25=7000 temperature=55 expect=viscosity:4.03e3 tolerance=2%}',
   ].join('\n'))
   expect(problems).toEqual([])
   expect(parts).toEqual([
     { n: 1, kind: 'effects', adjustable: 'front_diff_fluid' },
-    { n: 2, kind: 'calculator', slug: 'fluid-temperature', preset: { viscosityAt25: 7000, temperature: 55 } },
+    { n: 2, kind: 'calculator', slug: 'fluid-temperature', preset: { viscosityAt25: 7000, temperature: 55 }, end: 'front' },
     {
       n: 3, kind: 'worked', slug: 'fluid-temperature', inputs: { viscosityAt25: 7000, temperature: 55 },
       expect: { key: 'viscosity', value: 4030 }, tolerance: 0.02,
@@ -114,6 +114,7 @@ test.each([
   ['::calculator', ['1 missing_attribute']],
   ['::calculator{slug=x}', ['1 unknown_calculator']],
   ['::calculator{slug=fluid-temperature a=1}', ['1 unknown_input']],
+  ['::calculator{slug=fluid-temperature end=left}', ['1 unknown_end']],
   ['::calculator{slug=fluid-temperature temperature=warm}', ['1 not_a_number']],
   ['::calculator{slug=fluid-temperature temperature="1,000"}', ['1 not_a_number']],
   ['::calculator{slug=fluid-temperature temperature=121}', ['1 out_of_range']],

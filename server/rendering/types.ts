@@ -1,5 +1,6 @@
 export type { CalculatorVocabulary, Heading, RenderProblem, RenderResult, RenderVocabulary }
 
+import type { CarEnd } from '#shared/cars/car-ends.ts'
 import type { RenderedPart } from '#shared/rendering/parts.ts'
 
 /** What the renderer has to know of one calculator to check the numbers a guide gives it. */
@@ -8,6 +9,8 @@ interface CalculatorVocabulary {
   title: string
   inputs: { key: string; min: number; max: number; unit: string }[]
   outputs: { key: string; unit: string }[]
+  /** The ends of the car it can be about; none where it is about the whole car. */
+  ends: CarEnd[]
 }
 
 /**

@@ -1,5 +1,7 @@
 export { linkQuery, parametersFor }
 
+import { endsOf } from './ends.ts'
+import type { CarEnd } from '#shared/cars/car-ends.ts'
 import type { CalculatorDefinition } from './definition.ts'
 
 /**
@@ -21,17 +23,18 @@ function parametersFor(
 
 /**
  * The query that carries every number, always in the calculator's own units, so that the link means the same
- * to a reader with other units: `heat.temperature=55&heat.viscosityAt25=7000`.
+ * to a reader with other units: `heat.temperature=55&heat.viscosityAt25=7000`. Where the calculator is about one end of the
+ * car, the link says which.
  */
 function linkQuery(
   definition: CalculatorDefinition,
   instanceId: string,
   inputs: Readonly<Record<string, number>>,
+  end?: CarEnd,
 ): string {
-  return definition.inputs
-    .filter(({ key }) => inputs[key] !== undefined)
-    .map(
-      ({ key }) => `${encodeURIComponent(`${instanceId}.${key}`)}=${encodeURIComponent(String(inputs[key]))}`,
-    )
+  const numbers = definition.inputs.flatMap(({ key }) => (inputs[key] === undefined ? [] : [[key, String(inputs[key])]]))
+  const said = end !== undefined && endsOf(definition).length > 1 ? [...numbers, ['end', end]] : numbers
+  return said
+    .map(([key, value]) => `${encodeURIComponent(`${instanceId}.${key}`)}=${encodeURIComponent(value!)}`)
     .join('&')
 }

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { calculator } from './fluid-temperature/index.ts'
+import { calculator as gearing } from './gearing/index.ts'
 import { linkQuery, parametersFor } from './query.ts'
 import { plainSentence } from './sentence.ts'
 import { readTypedInputs } from './typed-inputs.ts'
@@ -29,6 +30,13 @@ describe('readTypedInputs', () => {
   })
 })
 
+it('asks for a bare number where the field has no unit', () => {
+  const { errors } = readTypedInputs(gearing, { spurTeeth: '3/32 in' }, {})
+  expect(errors.map(({ message }) => plainSentence(message))).toEqual([
+    `${gearing.inputs[0]?.label ?? ''} is a plain number: leave the unit out.`,
+  ])
+})
+
 describe('links', () => {
   it('carry every number in the calculator’s own units and are read back', () => {
     const query = linkQuery(calculator, 'heat', {
@@ -42,5 +50,10 @@ describe('links', () => {
       'heat',
     )
     expect(read).toEqual({ viscosityAt25: '7000', referenceTemperature: '25', temperature: '55.5' })
+  })
+
+  it('say which end of the car they are about, where there is a choice', () => {
+    expect(linkQuery(calculator, 'heat', { temperature: 55 }, 'rear')).toBe('heat.temperature=55&heat.end=rear')
+    expect(linkQuery({ ...calculator, inputs: [] }, 'heat', {}, 'rear')).toBe('')
   })
 })

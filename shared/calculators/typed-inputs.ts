@@ -28,6 +28,7 @@ function typedValue(
     case 'empty':
       return { error: [`Fill in ${lowerFirst(input.label)}, `, ...rangeOf(input), '.'] }
     case 'other_unit':
+      if (unitById(shown).symbol === '') return { error: say`${input.label} is a plain number: leave the unit out.` }
       return { error: say`${input.label} is measured in ${unitById(shown).symbol}; give it in that unit.` }
     case 'not_a_number':
       return { error: [`Type ${lowerFirst(input.label)} as a number, `, ...rangeOf(input), '.'] }

@@ -2,6 +2,7 @@ export { carGroups, carValueByKey, carValues }
 export type { CarEnd, CarGroup, CarKey, CarValue, CarValues, EnteredCarKey }
 
 import { carEndNames, type CarEnd } from './car-ends.ts'
+import { carRanges } from './car-ranges.ts'
 import { pointValues } from './suspension-points.ts'
 import type { UnitId } from '#shared/units/units.ts'
 
@@ -64,14 +65,14 @@ const both = <const Name extends string>(
  * fills in what a calculator asked for. Keys are kept in browsers and in the database, so none is ever renamed.
  */
 const carValues = [
-  value('whole', 'mass', 'Weight of the whole car', 'kg', [0.5, 12],
+  value('whole', 'mass', 'Weight of the whole car', 'kg', carRanges.mass,
     'Ready to race, with battery, body and wing, on a kitchen scale or the sum of four scales.'),
-  value('whole', 'frontWeight', 'Weight on the front wheels', '%', [20, 80],
+  value('whole', 'frontWeight', 'Weight on the front wheels', '%', carRanges.frontWeight,
     'Put the front wheels on a scale and the rear wheels on a block as high as the scale. Divide by the weight of the whole car.'),
-  value('whole', 'wheelbase', 'Wheelbase', 'mm', [100, 600],
+  value('whole', 'wheelbase', 'Wheelbase', 'mm', carRanges.wheelbase,
     'From the middle of a front axle to the middle of the rear axle on the same side, wheels pointing straight.'),
-  value('whole', 'cgHeight', 'Height of the centre of gravity', 'mm', [5, 200],
-    'Lift the front axle and weigh again: “cg-height” works it out. As a start, 40 to 50 mm suits a 1/8 buggy (common practice).'),
+  value('whole', 'cgHeight', 'Height of the centre of gravity', 'mm', carRanges.cgHeight,
+    'Lift the front axle and weigh again: the calculator for the height of the centre of gravity works it out. As a start, 40 to 50 mm suits a 1/8 buggy (common practice).'),
   value('whole', 'rearDriveShare', 'Share of the drive at the rear', '%', [0, 100],
     '100 for a two-wheel drive. A four-wheel drive with a diff in the middle sends about 50 each way while both ends grip.'),
 
@@ -101,7 +102,7 @@ const carValues = [
     'In the manual, or count them with the gearbox open.', true),
   value('gearing', 'motorKv', 'Motor constant kV', 'rpm/V', [100, 20000], 'On the motor’s label.'),
 
-  value('battery', 'cells', 'Cells in a row', '1', [1, 12], 'The number before the S on the battery’s label.', true),
+  value('battery', 'cells', 'Cells in a row', '1', carRanges.cells, 'The number before the S on the battery’s label.', true),
   value('battery', 'capacity', 'Battery capacity', 'mAh', [100, 30000], 'On the battery’s label.'),
   value('battery', 'averageCurrent', 'Average current in a race', 'A', [0.1, 300],
     'Capacity put back by the charger in mAh, times 0.06, divided by the minutes driven. A speed control that logs will tell you too.'),
@@ -114,7 +115,7 @@ const carValues = [
     end,
   })),
 
-  ...both('springs', 'SpringRate', 'spring rate', 'N/mm', [0.01, 50], 'From the maker’s table, or worked out from the wire by “spring-rate”.'),
+  ...both('springs', 'SpringRate', 'spring rate', 'N/mm', [0.01, 50], 'From the maker’s table, or worked out from the wire by the calculator for spring rates.'),
   ...both('springs', 'SpringWire', 'spring wire', 'mm', [0.2, 10], 'With a caliper, paint included; measure at three places.'),
   ...both('springs', 'SpringOutside', 'spring outside diameter', 'mm', [2, 100], 'With a caliper across the coils.'),
   ...both('springs', 'SpringCoils', 'working coils', '1', [0.5, 60], 'Count the coils that do not touch their neighbour; quarters count.'),

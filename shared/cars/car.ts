@@ -1,4 +1,4 @@
-export { CARS_AT_MOST, CAR_NAME_LENGTH, freeName, sameCar, sameName }
+export { CARS_AT_MOST, CAR_NAME_LENGTH, freeName, isNoted, sameCar, sameName }
 export type { Car, CarSheet }
 
 import type { CarClass } from '#shared/vocabulary/conditions.ts'
@@ -41,8 +41,17 @@ function freeName(wanted: string, note: string, taken: readonly string[]): strin
   const isFree = (name: string) => !taken.some((other) => sameName(other, name))
   if (isFree(wanted)) return wanted
   for (let n = 1; ; n += 1) {
-    const end = n === 1 ? ` (${note})` : ` (${note} ${n})`
-    const name = [...wanted].slice(0, CAR_NAME_LENGTH - end.length).join('').trimEnd() + end
+    const name = noted(wanted, note, n)
     if (isFree(name)) return name
   }
+}
+
+/** Whether `freeName` may have made this name of the wanted one. */
+function isNoted(name: string, wanted: string, note: string): boolean {
+  return Array.from({ length: CARS_AT_MOST }, (_, n) => noted(wanted, note, n + 1)).some((made) => sameName(made, name))
+}
+
+function noted(wanted: string, note: string, n: number): string {
+  const end = n === 1 ? ` (${note})` : ` (${note} ${n})`
+  return [...wanted].slice(0, CAR_NAME_LENGTH - end.length).join('').trimEnd() + end
 }

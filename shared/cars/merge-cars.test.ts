@@ -4,7 +4,7 @@ import { CARS_AT_MOST, sameName, type Car } from './car.ts'
 import type { CarValues } from './car-values.ts'
 import { mergeCars } from './merge-cars.ts'
 
-const copyId = ({ id, values, carClass }: Car) => `copy of ${id} ${carClass} ${JSON.stringify(Object.entries(values).sort())}`
+const copyId = ({ id, name, values, carClass }: Car) => `copy of ${id} ${name} ${carClass} ${JSON.stringify(Object.entries(values).sort())}`
 const car = (id: string, values: CarValues, more: Partial<Car> = {}): Car => ({ id, name: `Car ${id}`, carClass: null, values, ...more })
 
 describe('merging a browser’s cars into an account', () => {
@@ -28,6 +28,14 @@ describe('merging a browser’s cars into an account', () => {
     const { cars, held } = mergeCars([account], [car('a', { mass: 3.4, wheelbase: 325 }, { name: 'Kestrel 8e' })], copyId)
     expect(cars[0]).toEqual(account)
     expect(cars[1]).toMatchObject({ name: 'Kestrel 8e (from this browser)', values: { mass: 3.4, wheelbase: 325 } })
+    expect(held).toEqual(['a'])
+  })
+
+  it('never takes a renamed car for held: it comes in beside the other, under its own name', () => {
+    const account = car('a', { mass: 3.6 }, { name: 'Kestrel 8e' })
+    const renamed = car('a', { mass: 3.6 }, { name: 'Club car' })
+    const { cars, held } = mergeCars([account], [renamed], copyId)
+    expect(cars.map(({ name }) => name)).toEqual(['Kestrel 8e', 'Club car'])
     expect(held).toEqual(['a'])
   })
 
@@ -61,7 +69,7 @@ const someCar = fc.record({
   values: values.filter(fits),
 })
 const byId = { selector: ({ id }: Car) => id, maxLength: 4 }
-const account = fc.uniqueArray(someCar, byId).map((cars) => cars.map((each, n) => ({ ...each, name: `${each.name} ${n}` })))
+const account = fc.uniqueArray(someCar, byId).map((cars) => cars.filter(({ name }, n) => !cars.slice(0, n).some((other) => sameName(other.name, name))))
 const browser = fc.uniqueArray(someCar, byId)
 const contains = (whole: Car, part: Car) => Object.entries(part.values).every(([key, value]) => whole.values[key as 'mass'] === value)
 

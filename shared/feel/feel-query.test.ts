@@ -45,7 +45,7 @@ describe('readFeelQuery', () => {
   it.each([
     [{ complaint: 'entry.steering' }, '“entry.steering” is not a complaint that we know'],
     [{ complaint: 'entry.steering.more.x' }, 'is not a complaint that we know'],
-    [{ surface: 'moon' }, '“moon” is not a surface that we know. Known are: loose,'],
+    [{ surface: 'moon' }, '“moon” is not a surface that we know.'],
     [{ minutes: '-5' }, 'a whole number from 0 to 600'],
     [{ minutes: '20.5' }, 'a whole number from 0 to 600'],
     [{ minutes: '601' }, 'a whole number from 0 to 600'],

@@ -19,6 +19,8 @@ interface FeelQuery extends FeelConditions {
 interface FeelProblem {
   field: string
   message: string
+  /** What could stand there, as addresses and programs write it. */
+  known?: readonly string[]
 }
 
 /** What could be read, and words for what could not: an old link still answers as far as it can. */
@@ -39,15 +41,15 @@ const fields = ['complaint', 'class', 'surface', 'bite', 'minutes']
  */
 function readFeelQuery(raw: Raw): FeelReading {
   const problems: FeelProblem[] = []
-  const say = (field: string, message: string) => {
-    problems.push({ field, message })
+  const say = (field: string, message: string, known?: readonly string[]) => {
+    problems.push({ field, message, ...(known && { known }) })
     return undefined
   }
   const choice = <T extends string>(field: string, known: readonly T[]): T | undefined => {
     const [text = ''] = textsOf(raw[field])
     const found = known.find((each) => each === text)
     if (found !== undefined || text === '') return found
-    return say(field, `“${text}” is not a ${field} that we know. Known are: ${known.join(', ')}.`)
+    return say(field, `“${text}” is not a ${field} that we know.`, known)
   }
   const carClass = choice('class', CAR_CLASSES)
   const surface = choice('surface', SURFACES)
@@ -55,7 +57,7 @@ function readFeelQuery(raw: Raw): FeelReading {
   const minutes = readMinutes(textsOf(raw['minutes'])[0] ?? '', say)
   const complaints = readComplaints(textsOf(raw['complaint']), say)
   for (const name of Object.keys(raw)) {
-    if (!fields.includes(name)) say(name, `“${name}” is not asked here. Known are: ${fields.join(', ')}.`)
+    if (!fields.includes(name)) say(name, `“${name}” is not asked here.`, fields)
   }
   return {
     problems,
@@ -69,7 +71,7 @@ function readFeelQuery(raw: Raw): FeelReading {
   }
 }
 
-type Say = (field: string, message: string) => undefined
+type Say = (field: string, message: string, known?: readonly string[]) => undefined
 
 function readComplaints(texts: readonly string[], say: Say): FeelComplaint[] {
   const read: FeelComplaint[] = []

@@ -1,11 +1,15 @@
 export type { BodySegment, CalculatorPart, EffectsPart, RenderedPart, WorkedPart }
 
+import type { CarEnd } from '#shared/cars/car-ends.ts'
+
 /** A calculator with the writer's starting values, in the unit of each input. */
 interface CalculatorPart {
   n: number
   kind: 'calculator'
   slug: string
   preset: Record<string, number>
+  /** Which end of the car it is about, where the writer says so. */
+  end?: CarEnd
 }
 
 /** The lap line of one adjustable. */

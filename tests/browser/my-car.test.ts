@@ -194,7 +194,151 @@ describe('signing in', () => {
     await alive(other)
     await other.getByText('in your account now').waitFor()
     // On leaving, the page tries the account once more; whether that or the next page brings it, it gets there.
-    expect((await cars()).map(({ values }: { values: { mass: number } }) => values.mass)).toContain(1.7)
+    expect((await cars()).map(({ values }: { values: { mass: number } }) => values.mass)).toEqual([1.7])
+    await close()
+  })
+
+  it('brings back as they were the changes that the account did not hear of: a new name, a cleared value', async () => {
+    const priya = await app.signedIn('priya')
+    await priya.post('/api/cars').send({ id: crypto.randomUUID(), name: 'Kestrel', carClass: null, values: { mass: 3, wheelbase: 325 } }).expect(201)
+    const { page, context, close } = await chromium.visit(app.url)
+    await signInByForm(page, DEMO_PASSWORDS.priya!)
+    await openMyCar(page)
+    await context.setOffline(true)
+    await page.getByLabel('Name', { exact: true }).fill('Club car')
+    await value(page, 'mass').fill('3.6')
+    await value(page, 'wheelbase').fill('')
+    await page.getByText('Saved in this browser only: your account cannot be reached.').waitFor()
+    // The account stays away until the page is gone.
+    await page.goto('about:blank')
+    await context.setOffline(false)
+    await openMyCar(page)
+    await page.getByText('in your account now').waitFor()
+    expect(await cars()).toEqual([{ name: 'Club car', values: { mass: 3.6 }, chosen: true }])
+    expect([await value(page, 'mass').inputValue(), await value(page, 'wheelbase').inputValue()]).toEqual(['3.6', ''])
+    await close()
+  })
+
+  it('gives a member’s car that waits in a shared browser to nobody else', async () => {
+    const { page, context, close } = await chromium.visit(app.url)
+    const { rows } = await app.app.connection.pool.query<{ id: string }>(`select id from members where key = 'priya'`)
+    await page.goto('/robots.txt')
+    await page.evaluate((owner) => {
+      const car = { id: crypto.randomUUID(), name: 'Kestrel', carClass: null, values: { mass: 3.6 }, owner }
+      localStorage.setItem('camber-clay.cars', JSON.stringify({ cars: [car], chosen: car.id }))
+    }, rows[0]!.id)
+    await openMyCar(page)
+    expect(await value(page, 'mass').inputValue()).toBe('')
+    await signInByForm(page, DEMO_PASSWORDS.odile!)
+    await openMyCar(page)
+    await value(page, 'spurTeeth').fill('46')
+    await kept(page, 'account')
+    expect(await cars()).toMatchObject([{ values: { spurTeeth: 46 } }])
+    await page.goto('about:blank')
+    await context.clearCookies()
+    await signInByForm(page, DEMO_PASSWORDS.priya!)
+    await openMyCar(page)
+    await page.getByText('in your account now').waitFor()
+    expect(await cars()).toMatchObject([{ values: { spurTeeth: 46 } }, { values: { mass: 3.6 } }])
+    await close()
+  })
+})
+
+describe('a page whose script comes late', () => {
+  /** Opens a page that gets no script before `go`; the page after it gets its own once `next` is called. */
+  async function openLate(page: Page, path: string): Promise<{ go(): void; next(): void }> {
+    let late = true
+    let go = () => {}
+    const gate = new Promise<void>((resolve) => (go = resolve))
+    await page.route('**/*.js', async (route) => {
+      if (late) await gate
+      await route.continue()
+    })
+    await page.goto(path, { waitUntil: 'commit' })
+    return { go, next: () => (late = false) }
+  }
+
+  it('reads what was typed before in the units that stood there', async () => {
+    const { page, complaints, close } = await chromium.visit(app.url)
+    await page.goto('/robots.txt')
+    await page.evaluate(() => localStorage.setItem('camber-clay.units', JSON.stringify({ length: 'in' })))
+    const { go } = await openLate(page, '/my-car')
+    await value(page, 'wheelbase').fill('325')
+    await page.getByLabel('Name', { exact: true }).fill('Kestrel 8e')
+    go()
+    await kept(page, 'browser')
+    expect(await value(page, 'wheelbase').inputValue()).toBe('12.79528')
+    expect(await page.evaluate(() => (JSON.parse(localStorage.getItem('camber-clay.cars')!) as { cars: object[] }).cars)).toMatchObject([
+      { name: 'Kestrel 8e', values: { wheelbase: 325 } },
+    ])
+    expect(complaints).toEqual([])
+    await close()
+  })
+
+  it('keeps what a refused form held, with its words, and saves what can be', async () => {
+    const { page, complaints, close } = await chromium.visit(app.url)
+    await signInByForm(page, DEMO_PASSWORDS.priya!)
+    const { next } = await openLate(page, '/my-car')
+    await page.getByLabel('Name', { exact: true }).fill('Kestrel 8e')
+    await page.getByLabel('Class', { exact: true }).selectOption('buggy_8e')
+    await value(page, 'mass').fill('140')
+    await value(page, 'wheelbase').fill('284')
+    next()
+    await value(page, 'wheelbase').press('Enter')
+    await kept(page, 'account')
+    expect(await page.getByLabel('Name', { exact: true }).inputValue()).toBe('Kestrel 8e')
+    expect(await page.getByLabel('Class', { exact: true }).inputValue()).toBe('buggy_8e')
+    expect([await value(page, 'mass').inputValue(), await value(page, 'wheelbase').inputValue()]).toEqual(['140', '284'])
+    expect(await page.locator('#value-mass-error').innerText()).toMatch(/between 0.5\skg and 12\skg/)
+    expect(await cars()).toEqual([{ name: 'Kestrel 8e', values: { wheelbase: 284 }, chosen: true }])
+    expect(complaints.filter((each) => !each.includes('422'))).toEqual([])
+    await close()
+  })
+
+  it('asks which numbers count when the car of a refused form was changed meanwhile', async () => {
+    const priya = await app.signedIn('priya')
+    const id = crypto.randomUUID()
+    await priya.post('/api/cars').send({ id, name: 'Kestrel', carClass: null, values: { mass: 3 } }).expect(201)
+    const { page, close } = await chromium.visit(app.url)
+    await signInByForm(page, DEMO_PASSWORDS.priya!)
+    const { next } = await openLate(page, '/my-car')
+    await value(page, 'mass').fill('3.6')
+    await priya.put(`/api/cars/${id}`).set('If-Match', '"1"').send({ name: 'Kestrel', carClass: null, values: { mass: 3.2 } }).expect(200)
+    next()
+    await value(page, 'mass').press('Enter')
+    await page.getByRole('button', { name: 'Keep what I typed here' }).click()
+    await kept(page, 'account')
+    expect(await cars()).toEqual([{ name: 'Kestrel', values: { mass: 3.6 }, chosen: true }])
+    await close()
+  })
+})
+
+describe('a car that is open in two places', () => {
+  it('follows another tab, but leaves alone what is half typed', async () => {
+    const { page, context, close } = await chromium.visit(app.url)
+    await openMyCar(page)
+    await value(page, 'mass').fill('3.6')
+    await kept(page, 'browser')
+    await value(page, 'wheelbase').fill('325 m')
+    const other = await context.newPage()
+    await openMyCar(other)
+    await value(other, 'mass').fill('3.7')
+    await value(other, 'spurTeeth').fill('46')
+    await page.waitForFunction(() => (document.querySelector('#value-spurTeeth') as HTMLInputElement).value === '46')
+    expect([await value(page, 'mass').inputValue(), await value(page, 'wheelbase').inputValue()]).toEqual(['3.7', '325 m'])
+    await close()
+  })
+
+  it('takes up what the account has by now when the browser shows the page again', async () => {
+    const priya = await app.signedIn('priya')
+    const id = crypto.randomUUID()
+    await priya.post('/api/cars').send({ id, name: 'Kestrel', carClass: null, values: { mass: 3 } }).expect(201)
+    const { page, close } = await chromium.visit(app.url)
+    await signInByForm(page, DEMO_PASSWORDS.priya!)
+    await openMyCar(page)
+    await priya.put(`/api/cars/${id}`).set('If-Match', '"1"').send({ name: 'Kestrel', carClass: null, values: { mass: 3.2 } }).expect(200)
+    await page.evaluate(() => dispatchEvent(new PageTransitionEvent('pageshow', { persisted: true })))
+    await page.waitForFunction(() => (document.querySelector('#value-mass') as HTMLInputElement).value === '3.2')
     await close()
   })
 })

@@ -2,6 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { createTestApp, type TestApp } from '../support/test-app.ts'
 import { aCar, createCar, newId, tag } from './cars-support.ts'
 import { rows, type Agent } from './edits-support.ts'
+import { CARS_AT_MOST } from '#shared/cars/car.ts'
 import type { CarView } from '#shared/schemas/car.ts'
 
 let app: TestApp
@@ -91,8 +92,8 @@ describe('one’s own cars', () => {
     const [member] = await rows<{ id: string }>(app, `select id from members where key = 'imre'`)
     const insert = (values: string) =>
       rows(app, 'insert into cars (member_id, id, name, values) values ($1, $2, $3, $4)', [member!.id, newId(), newId(), values])
-    for (let n = 1; n <= 20; n += 1) await insert('{}')
-    await expect(insert('{}')).rejects.toThrow('at most 20')
+    for (let n = 1; n <= CARS_AT_MOST; n += 1) await insert('{}')
+    await expect(insert('{}')).rejects.toThrow(`at most ${CARS_AT_MOST} cars`)
     await rows(app, 'delete from cars')
     await expect(insert('[]')).rejects.toThrow('cars_values_object')
     await expect(insert(JSON.stringify({ x: 'x'.repeat(20_000) }))).rejects.toThrow('cars_values_size')

@@ -1,3 +1,4 @@
+import { JSDOM } from 'jsdom'
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { createTestApp, type TestApp } from '../support/test-app.ts'
 import { aCar, createCar, newId } from './cars-support.ts'
@@ -115,7 +116,47 @@ describe('the forms of “My car”', () => {
     expect((await priya.get('/api/cars')).body).toMatchObject([{ version: 1, values: { mass: 3 } }])
   })
 
+  it('show again a refused car with its name and class, on the car that the form was about', async () => {
+    const first = await createCar(priya, { name: 'Kestrel 8e', values: { mass: 3.4 } })
+    const id = newId()
+    const posted = { id, name: 'Club car', carClass: 'truggy_8', 'value.mass': '140', 'value.wheelbase': '284' }
+    const page = new JSDOM((await priya.post('/my-car').type('form').send(posted).expect(422)).text).window.document
+    const field = (name: string) => page.querySelector<HTMLInputElement>(`.mc-m [name="${name}"]:not([type=hidden])`)
+    expect([field('name'), field('value.mass'), field('value.wheelbase')].map((each) => each?.getAttribute('value'))).toEqual(['Club car', '140', '284'])
+    expect(page.querySelector<HTMLSelectElement>('select[name=carClass]')!.value).toBe('truggy_8')
+    expect(page.querySelector<HTMLInputElement>('#car input[name=id]')!.value).toBe(id)
+    const changed = { version: '1', name: 'Kestrel 8e', carClass: 'tank', 'value.mass': '140' }
+    const again = new JSDOM((await priya.post(`/my-car/${first.id}`).type('form').send(changed).expect(422)).text).window.document
+    expect(again.querySelector('#value-mass')!.getAttribute('value')).toBe('140')
+  })
+
+  it('begin another car under a name that is free, and leave the open one alone when it is refused', async () => {
+    await createCar(priya, { name: 'Car 2', values: { mass: 3.4 } })
+    const page = new JSDOM((await priya.get('/my-car').expect(200)).text).window.document
+    const offered = page.querySelector<HTMLInputElement>('form[action="/my-car"] input[name=name]')!.value
+    expect(offered).toBe('Car 2 (new)')
+    const refused = new JSDOM((await priya.post('/my-car').type('form').send({ id: newId(), name: 'Car 2' }).expect(422)).text).window.document
+    expect(refused.querySelector('#errors')?.textContent).toContain('already have a car called')
+    expect(refused.querySelector('#value-mass')!.getAttribute('value')).toBe('3.4')
+  })
+
+  it('say it in words when the car was changed meanwhile', async () => {
+    const car = await createCar(priya)
+    const stale = new JSDOM((await priya.post(`/my-car/${car.id}`).type('form').send({ version: '9', name: car.name, 'value.mass': '3.3' }).expect(412)).text).window.document
+    expect(stale.querySelector('#errors')?.textContent).toContain('in another tab or on another device')
+    expect(stale.querySelector<HTMLInputElement>('#car input[name=version]')!.value).toBe('1')
+  })
+
+  it('give everything that was typed back to who is no longer signed in', async () => {
+    const posted = { id: newId(), name: 'Kestrel 8e', 'value.mass': '3,6', 'value.frontBarDiameter': '3/32 in', 'value.wheelbase': '' }
+    const page = new JSDOM((await app.agent().post('/my-car').type('form').send(posted).expect(401)).text).window.document
+    const typed = [...page.querySelectorAll('textarea')].map(({ name, value }) => [name, value])
+    expect(typed).toEqual([['typed.name', 'Kestrel 8e'], ['typed.value.mass', '3,6'], ['typed.value.frontBarDiameter', '3/32 in']])
+    expect(page.body.textContent).toContain('Weight of the whole car, kg')
+    expect(page.querySelector<HTMLInputElement>('input[name=next]')!.value).toBe('/my-car')
+  })
+
   it('ask a visitor to sign in', async () => {
-    await app.agent().post('/my-car').type('form').send({ id: newId(), name: 'x' }).redirects(0).expect(303).expect('Location', /^\/sign-in/)
+    await app.agent().post('/my-car').type('form').send({ id: newId(), name: ' ' }).redirects(0).expect(303).expect('Location', /^\/sign-in/)
   })
 })

@@ -59,8 +59,8 @@ const cases: readonly ReferenceCase[] = [
     ...base,
     what: 'speed of the default car by the engineering form v = 0.06 n U/i',
     source:
-      'engineersedge.com, Vehicle Speed basis of engine rpm, tire size and gear ratios: n in rev/min, U in m, v in km/h',
-    evidence: 'read',
+      'The formula was read at engineersedge.com (Vehicle Speed basis of engine rpm, tire size and gear ratios: n in rev/min, U in m, v in km/h); its value for this car was worked out here',
+    evidence: 'computed independently',
     unit: 'km/h',
     ...relative((0.06 * 2050 * 4 * 3.7 * 2 * Math.PI * 0.0575) / ((46 / 15) * (43 / 11)), 1e-12),
     toleranceReason: rounding,

@@ -35,6 +35,8 @@ const matrix: Record<string, Outcome[]> = {
   '/members': ['sign-in', 403, 403, 403, 'open'],
   // A visitor's car is kept by the browser.
   '/my-car': all('open'),
+  '/report': ['sign-in', 403, 'open', 'open', 'open'],
+  '/reports': ['sign-in', 403, 403, 'open', 'open'],
   '/reset': all('open'),
   '/review': ['sign-in', 403, 403, 'open', 'open'],
   '/review/@id': ['sign-in', 403, 403, 'open', 'open'],

@@ -21,6 +21,8 @@ const admins: Outcome[] = [401, 403, 403, 403, 'in']
 const writerOnly: Outcome[] = [401, 404, 404, 403, 403]
 const hidden: Outcome[] = [401, 404, 404, 404, 404]
 const deskOnly: Outcome[] = [401, 404, 404, 'in', 'in']
+/** A report of somebody else: moderators decide whether it counts. */
+const moderators: Outcome[] = [401, 403, 403, 'in', 'in']
 const form = (outcomes: Outcome[]): Outcome[] => outcomes.map((outcome) => (outcome === 401 ? 'sign-in' : outcome))
 
 const matrix: Record<string, Outcome[]> = {
@@ -62,6 +64,11 @@ const matrix: Record<string, Outcome[]> = {
   'PUT /api/cars/:id': hidden,
   'DELETE /api/cars/:id': hidden,
   'POST /api/cars/:id/choose': hidden,
+  'GET /api/heat-reports': members,
+  'POST /api/heat-reports': verified,
+  'DELETE /api/heat-reports/:id': hidden,
+  'POST /api/heat-reports/:id/set-aside': moderators,
+  'DELETE /api/heat-reports/:id/set-aside': moderators,
   'POST /api/members': all('in'),
   'GET /api/members': admins,
   'PUT /api/members/:id/role': admins,
@@ -100,6 +107,10 @@ const matrix: Record<string, Outcome[]> = {
   'POST /my-car/:id/choose': form(hidden),
   'POST /my-car/:id/copy': form(hidden),
   'POST /my-car/:id/delete': form(hidden),
+  'POST /report': form(verified),
+  'POST /you/reports/:id/take-back': form(hidden),
+  'POST /reports/:id/set-aside': form(moderators),
+  'POST /reports/:id/let-count': form(moderators),
   'POST /review/:id/approve': form(deskOnly),
   'POST /review/:id/ask': form(deskOnly),
   'POST /review/:id/decline': form(deskOnly),
@@ -119,6 +130,7 @@ let app: TestApp
 let editId: string
 let memberId: string
 let carId: string
+let reportId: string
 let agents: Record<Role, ReturnType<typeof supertest.agent>>
 
 beforeAll(async () => {
@@ -135,6 +147,8 @@ beforeAll(async () => {
   const me = await writer.get('/api/session').expect(200)
   carId = randomUUID()
   await writer.post('/api/cars').send({ id: carId, name: 'His own', values: { mass: 3.6 } }).expect(201)
+  const tried = { adjustable: 'caster', direction: 'up', verdict: 'helped', carClass: 'buggy_8e', surface: 'loam', bite: 'low' }
+  reportId = ((await writer.post('/api/heat-reports').send(tried).expect(201)).body as { id: string }).id
   memberId = (me.body as { member: { id: string } }).member.id
   agents = {
     visitor: app.agent(),
@@ -199,6 +213,7 @@ async function request(
     .replace('/members/:id', `/members/${memberId}`)
     .replace('/mailbox/:id', '/mailbox/none')
     .replace('/cars/:id', `/cars/${carId}`)
+    .replace(/reports\/:id/, `reports/${reportId}`)
     .replace('/my-car/:id', `/my-car/${carId}`)
     .replace(':id', editId)
     .replace('guides/:slug', 'guides/droop')

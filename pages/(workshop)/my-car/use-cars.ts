@@ -4,7 +4,7 @@ export type { CarsDesk }
 import { computed, onBeforeUnmount, onMounted, reactive, ref, shallowRef, watch } from 'vue'
 import { useReaderChoices } from '#renderer/calculators/reader-choices.ts'
 import { chooseAccountCar, createAccountCar, deleteAccountCar, listAccountCars, saveAccountCar } from '#renderer/cars/account-cars.ts'
-import { draftOf, draftTexts, readDraft, typeInto, type CarDraft } from '#renderer/cars/car-draft.ts'
+import { draftOf, draftTexts, followCar, readDraft, typeInto, type CarDraft } from '#renderer/cars/car-draft.ts'
 import { createCarKeeper, type CarKeeper, type KeepState, type KeptCar } from '#renderer/cars/car-keeper.ts'
 import { handOverCars } from '#renderer/cars/hand-over.ts'
 import { keepCars, KEPT_CARS, keptCars, letGo, putKeptCar } from '#renderer/cars/kept-cars.ts'
@@ -16,12 +16,17 @@ import type { UnitChoices } from '#shared/units/unit-choices.ts'
 type CarsDesk = ReturnType<typeof useCars>
 
 interface Start {
-  member: boolean
+  /** Id of who is signed in; null for a visitor. */
+  memberId: string | null
   /** What the account keeps. */
   cars: readonly CarView[]
   newId: string
   /** The car that the address asks for. */
   asked: string | undefined
+  /** A form that was refused and shows a car of its own, which the account does not have. */
+  formId: string | undefined
+  /** Types again what was typed before the page was alive, while the units are still those that the server printed. */
+  typeAgain(): void
 }
 
 type Listed = KeptCar & { isNew?: boolean }
@@ -30,13 +35,15 @@ type Listed = KeptCar & { isNew?: boolean }
  * The cars of one reader on the page: which is open, what is typed, where it is kept. A member's come from the account, a
  * visitor's from the browser once the page is alive, so that server and browser begin alike.
  */
-function useCars({ member, cars: account, newId, asked }: Start) {
+function useCars({ memberId, cars: account, newId, asked, formId, typeAgain }: Start) {
+  const member = memberId !== null
   const choices = useReaderChoices()
   const alive = ref(false)
   const units = computed((): UnitChoices => (alive.value ? choices.units : {}))
   const cars = ref<Listed[]>(account.map(listed))
   const chosen = ref<string | null>(account.find((car) => car.chosen)?.id ?? null)
-  const first = cars.value.find(({ id }) => id === asked) ?? cars.value.find(({ id }) => id === chosen.value) ?? cars.value[0] ?? blank(newId, [])
+  const ofForm = formId === undefined ? undefined : (cars.value.find(({ id }) => id === formId) ?? blank(formId, account.map(({ name }) => name)))
+  const first = ofForm ?? cars.value.find(({ id }) => id === asked) ?? cars.value.find(({ id }) => id === chosen.value) ?? cars.value[0] ?? blank(newId, [])
   const current = ref<Listed>(first)
   const draft = reactive<CarDraft>(draftOf(first, {}))
   const state = shallowRef<KeepState>(restState(first))
@@ -52,20 +59,27 @@ function useCars({ member, cars: account, newId, asked }: Start) {
     return car.isNew ? { name: 'nothing' } : { name: 'saved', where: member ? 'account' : 'browser' }
   }
 
-  function open(car: Listed): void {
+  /** @param follow what the fields were filled from, where they show this car already and go on being filled in */
+  function open(car: Listed, follow?: Listed): void {
     keeper?.stop()
     current.value = car
-    Object.assign(draft, draftOf(car, units.value))
+    if (follow === undefined) Object.assign(draft, draftOf(car, units.value))
+    else followCar(draft, { before: follow, after: car, units: units.value, typing: typingIn() })
     state.value = restState(car)
     keeper = createCarKeeper({ ...car }, ports, {
       state: (next) => {
         if (current.value.id === car.id) state.value = next
       },
-      kept: (kept, joined) => {
+      kept: (kept, instead) => {
         replace({ ...listed(kept), version: kept.version })
-        if (joined && current.value.id === car.id) Object.assign(draft, draftOf(kept, units.value))
+        if (instead === null || current.value.id !== car.id) return
+        followCar(draft, { before: instead, after: kept, units: units.value })
       },
     })
+  }
+  function typingIn(): EnteredCarKey | undefined {
+    const name = document.activeElement?.getAttribute('name') ?? ''
+    return name.startsWith('value.') ? (name.slice('value.'.length) as EnteredCarKey) : undefined
   }
 
   /** Puts a car in its place in the list, or at its end. */
@@ -142,9 +156,9 @@ function useCars({ member, cars: account, newId, asked }: Start) {
         return
       }
     }
-    const kept = keptCars()
+    const kept = keptCars(memberId)
     const left = kept.cars.filter(({ id }) => id !== gone.id)
-    keepCars({ cars: left, chosen: left.some(({ id }) => id === kept.chosen) ? kept.chosen : (left[0]?.id ?? null) })
+    keepCars({ cars: left, chosen: left.some(({ id }) => id === kept.chosen) ? kept.chosen : (left[0]?.id ?? null) }, memberId)
     cars.value = cars.value.filter(({ id }) => id !== gone.id)
     if (chosen.value === gone.id) chosen.value = member ? (await listAccountCars())?.find((car) => car.chosen)?.id ?? null : keptCars().chosen
     deleted.value = gone
@@ -162,7 +176,10 @@ function useCars({ member, cars: account, newId, asked }: Start) {
     create: createAccountCar,
     save: saveAccountCar,
     list: listAccountCars,
-    browser: { put: putKeptCar, letGo },
+    browser: {
+      put: (car, base) => putKeptCar({ id: car.id, name: car.name, carClass: car.carClass, values: { ...car.values }, ...(member && { owner: memberId }), ...(base && { base }) }),
+      letGo: (sent) => letGo(sent, memberId),
+    },
     later(milliseconds, run) {
       const timer = setTimeout(run, milliseconds)
       return () => clearTimeout(timer)
@@ -170,19 +187,35 @@ function useCars({ member, cars: account, newId, asked }: Start) {
   }
 
   async function takeOver(): Promise<void> {
-    const before = keptCars().cars
-    if (before.length === 0) return
-    const merged = await handOverCars()
-    const left = keptCars().cars.filter(({ id }) => before.some((car) => car.id === id)).map(({ name }) => name)
+    const before = keptCars(memberId).cars
+    if (memberId === null || before.length === 0) return
+    const merged = await handOverCars(memberId)
+    const left = keptCars(memberId).cars.filter(({ id }) => before.some((car) => car.id === id)).map(({ name }) => name)
     handedOver.value = { taken: before.length - left.length, left }
     if (merged === null) return
     const untouched = current.value.isNew && Object.keys(draft.texts).length === 0
-    const openId = current.value.id
-    cars.value = merged.cars.map(listed)
-    chosen.value = merged.cars.find((car) => car.chosen)?.id ?? null
-    const next = cars.value.find(({ id }) => id === (untouched ? chosen.value : openId))
-    // What is being typed goes on; the version that the account has now is met when it is saved.
-    if (next !== undefined && (untouched || reading.value.car === null || state.value.name === 'saved')) open(next)
+    takeAccount(merged, untouched ? (merged.find((car) => car.chosen)?.id ?? null) : current.value.id)
+  }
+  /** The account's cars as they are now, and which of them to show. */
+  function takeAccount(account: readonly CarView[], openId: string | null): void {
+    const before = current.value
+    cars.value = account.map(listed)
+    chosen.value = account.find((car) => car.chosen)?.id ?? null
+    const next = cars.value.find(({ id }) => id === openId)
+    if (next === undefined) return
+    // What is on its way goes on; the version that the account has now is met when it is saved.
+    if (next.id !== before.id) open(next)
+    else if (state.value.name === 'saved') open(next, before)
+  }
+  /** Comes back as it was left, perhaps hours ago: what the account has by now counts where nothing is being typed. */
+  async function comeBack(): Promise<void> {
+    if (!member) {
+      takeKept()
+      return
+    }
+    await takeOver()
+    const account = await listAccountCars()
+    if (account !== null) takeAccount(account, current.value.id)
   }
 
   /** A visitor's cars, at the start and when another tab has changed them. */
@@ -191,31 +224,37 @@ function useCars({ member, cars: account, newId, asked }: Start) {
     cars.value = kept.cars.map((car) => ({ ...car, version: null }))
     chosen.value = kept.chosen
     const next = cars.value.find(({ id }) => id === (alive.value ? current.value.id : (asked ?? kept.chosen))) ?? cars.value.find(({ id }) => id === kept.chosen)
-    if (next !== undefined) open(next)
+    if (next !== undefined) open(next, alive.value && next.id === current.value.id ? current.value : undefined)
   }
   const otherTab = ({ key }: StorageEvent) => {
     if (key === KEPT_CARS && !member) takeKept()
   }
   const leave = () => {
-    const { car } = reading.value
-    if (member && car !== null && state.value.name === 'saving') putKeptCar(car)
+    keeper?.leave()
     void keeper?.flush(true)
   }
   const hidden = () => document.visibilityState === 'hidden' && leave()
 
+  const shownAgain = ({ persisted }: PageTransitionEvent) => {
+    if (persisted) void comeBack()
+  }
+
   onMounted(() => {
-    choices.load()
     open(current.value)
     if (!member) takeKept()
+    typeAgain()
+    choices.load()
     alive.value = true
     if (member) void takeOver()
     addEventListener('storage', otherTab)
+    addEventListener('pageshow', shownAgain)
     addEventListener('pagehide', leave)
     document.addEventListener('visibilitychange', hidden)
   })
   onBeforeUnmount(() => {
     keeper?.stop()
     removeEventListener('storage', otherTab)
+    removeEventListener('pageshow', shownAgain)
     removeEventListener('pagehide', leave)
     document.removeEventListener('visibilitychange', hidden)
   })
@@ -226,6 +265,9 @@ function useCars({ member, cars: account, newId, asked }: Start) {
     alive, units, cars, chosen, current, draft, state, reading, full, deleted, handedOver, member,
     show, type, rename, classify, addNew, copy, choose, remove, bringBack,
     flush: () => keeper?.flush(),
+    /** The name that another car begins with. */
+    nextName: computed(() => blank('', names()).name),
+    ask: (theirs: CarView) => keeper?.ask(theirs),
     settle: (theirs: CarView, side: 'mine' | 'theirs') => keeper?.settle(theirs, side),
   }
 }

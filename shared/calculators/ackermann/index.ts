@@ -110,6 +110,12 @@ const calculator = defineCalculator({
         message: say`The inner wheel turns less than the outer one. Check that the two are not exchanged.`,
       })
     }
+    if (outerAngle >= 5 && Math.abs(outputs.ackermann) > 200) {
+      warnings.push({
+        field: 'innerAngle',
+        message: say`Far more than ${figure(100, '%')} comes from angles that no steering gives. Measure both wheels again, near full lock.`,
+      })
+    }
     if (outputs.turnRadius < 0) {
       warnings.push({
         field: 'outerAngle',

@@ -113,9 +113,11 @@ const calculator = defineCalculator({
     const spared = springLoad - moved * (1 - more / 100)
     return {
       says:
-        more - antiSquat < 0.05
+        inputs.rearDriveShare === 0
           ? say`With no drive at the rear, tilting the pins changes nothing.`
-          : say`One degree more adds ${figure(more - antiSquat, '%', 2)} of anti-squat and takes ${figure(spared, 'N', 2)} off the rear springs.`,
+          : inputs.acceleration === 0
+            ? say`One degree more adds ${figure(more - antiSquat, '%', 2)} of anti-squat, which the arms use once the car accelerates.`
+            : say`One degree more adds ${figure(more - antiSquat, '%', 2)} of anti-squat and takes ${figure(spared, 'N', 2)} off the rear springs.`,
       caption: 'If you tilt the pins one degree more',
       columns: ['Now', 'One degree more'],
       rows: [

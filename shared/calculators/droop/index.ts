@@ -99,7 +99,7 @@ const calculator = defineCalculator({
     if (Math.abs(armAngle) > 20) {
       warnings.push({
         field: 'turns',
-        message: say`The arm swings by ${figure(Math.abs(armAngle), 'deg')}. So far from level the wheel moves less than this says, and the shock or a joint may stop it first.`,
+        message: say`The arm swings by ${figure(Math.abs(armAngle), 'deg')}. An arm that already hangs moves its wheel less than this says, and the shock or a joint may stop it first.`,
       })
     }
     return warnings

@@ -35,7 +35,7 @@ function blendPlot(
     lines: [
       {
         kind: 'other',
-        label: say`second rule`,
+        label: say`2nd rule`,
         points: sampled(0, 100, (percent) => blendRefutas(pair(percent / 100))),
       },
       { kind: 'main', label: [], points: sampled(0, 100, (percent) => blendLogLinear(pair(percent / 100))) },

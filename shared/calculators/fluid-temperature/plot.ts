@@ -25,7 +25,8 @@ function temperaturePlot(
       label: 'thickness',
       unit: 'cSt',
       scale: 'log',
-      min: viscosityAt(Math.min(...fluids), hottest),
+      // Room below the curves, so that their names stay clear of the numbers of the axis.
+      min: 0.8 * viscosityAt(Math.min(...fluids), hottest),
       max: viscosityAt(Math.max(...fluids), coldest),
     },
     lines: [
@@ -40,7 +41,7 @@ function temperaturePlot(
       {
         x: temperature,
         y: viscosity,
-        label: say`${figure(viscosity, 'cSt')} at ${figure(temperature, '°C')}`,
+        label: say`${figure(viscosity, 'cSt')}`,
       },
     ],
   }

@@ -107,7 +107,7 @@ describe('gearing', () => {
   it('refuses what is no gear', () => {
     expect(refused({ pinionTeeth: 14.5 })).toEqual([['pinionTeeth', 'Pinion must be a whole number.']])
     expect(refused({ pinionTeeth: 0 })).toEqual([
-      ['pinionTeeth', 'Pinion must be between 5 and 80: gears of model cars have so many teeth.'],
+      ['pinionTeeth', 'Pinion must be between 5 and 80: no gear of a model car has fewer or more.'],
     ])
     expect(
       refused({ spurTeeth: -46, ringTeeth: '43', motorKv: Infinity, cells: null }).map(([field]) => field),

@@ -1,5 +1,6 @@
 export { calculator }
 
+import { carRanges } from '#shared/cars/car-ranges.ts'
 import { changeInWords } from '../common/change-in-words.ts'
 import { defineCalculator, type CalculatorInput, type FieldMessage } from '../definition.ts'
 import { figure, mainFigure, say } from '../sentence.ts'
@@ -26,7 +27,7 @@ const teeth = <const Key extends 'spurTeeth' | 'pinionTeeth' | 'ringTeeth' | 'di
   default: standard,
   step: 1,
   whole: true,
-  reason: 'gears of model cars have so many teeth',
+  reason: 'no gear of a model car has fewer or more',
   carKey: key,
 })
 
@@ -95,11 +96,11 @@ const calculator = defineCalculator({
       label: 'Cells in a row',
       unit: '1',
       default: 4,
-      min: 1,
-      max: 14,
+      min: carRanges.cells[0],
+      max: carRanges.cells[1],
       step: 1,
       whole: true,
-      reason: 'a battery of a model car has so many cells in a row',
+      reason: 'no battery of a model car has more cells in a row',
       help: 'The number before the S on the battery’s label.',
       carKey: 'cells',
     },
@@ -136,7 +137,7 @@ const calculator = defineCalculator({
     if (pinionTeeth >= spurTeeth) {
       warnings.push({
         field: 'pinionTeeth',
-        message: say`A pinion with as many teeth as the spur, or more, turns the wheels faster than the motor. Are the two swapped?`,
+        message: say`A pinion with as many teeth as the spur, or more, is in no usual car. Are the two swapped?`,
       })
     }
     if (diffPinionTeeth > ringTeeth) {

@@ -58,7 +58,7 @@ function shiftDrawing({ cgForward, cgLeft, cgUp }: Shift): DrawingSpec {
       },
       {
         kind: 'label',
-        at: [2 * reach - 8 * px, middle - half + 8 * px],
+        at: [2 * reach - 8 * px, middle - half + 18 * px],
         anchor: 'end',
         text: say`forward →`,
       },

@@ -52,11 +52,19 @@ function rollBalance(values: BalanceValues) {
       elastic,
       geometric,
       moved,
+      still,
       inside: still - moved,
       /** Side acceleration in g at which the inside wheel carries nothing; everything here grows in step with it. */
       liftsAt: moved > 0 ? (lateralAcceleration * still) / moved : Infinity,
     }
   }
+  const axles = {
+    front: axle(front, stiffnessFront, rollCentreFront, values.trackFront),
+    rear: axle(1 - front, stiffnessRear, rollCentreRear, values.trackRear),
+  }
+  // What holds the car down against what turns it over, both axles together.
+  const holding = axles.front.still * values.trackFront + axles.rear.still * values.trackRear
+  const turning = axles.front.moved * values.trackFront + axles.rear.moved * values.trackRear
   return {
     axisHeight,
     lever,
@@ -64,7 +72,11 @@ function rollBalance(values: BalanceValues) {
     stiffnessFront: stiffnessFront * degree,
     stiffnessRear: stiffnessRear * degree,
     rollAngle: angle / degree,
-    front: axle(front, stiffnessFront, rollCentreFront, values.trackFront),
-    rear: axle(1 - front, stiffnessRear, rollCentreRear, values.trackRear),
+    ...axles,
+    /**
+     * Side acceleration in g at which the car goes over. One axle may lift long before: the other then holds the
+     * car alone, so this comes from the moments of both together.
+     */
+    rollsAt: turning > 0 ? (lateralAcceleration * holding) / turning : Infinity,
   }
 }

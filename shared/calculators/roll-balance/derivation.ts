@@ -9,15 +9,9 @@ import type { DrawingSpec } from '../drawing.ts'
 const derivation: Derivation = {
   steps: [
     {
-      text: 'When an axle leans by φ, its outside wheel goes up and its inside wheel down by half the track times φ. Springs and bar push back with their rates, each on an arm of half the track.',
+      text: 'When an axle leans by φ, its outside wheel goes up and its inside wheel down by half the track times φ. Springs and bar push back with their rates, each on an arm of half the track: twice their sum times the square of half the track.',
       formula: math(
         'K',
-        '=',
-        '2',
-        '×',
-        fenced(sub('k', 'wheel'), '+', sub('k', 'bar')),
-        '×',
-        power(fenced(frac('t', '2')), '2'),
         '=',
         frac(row(fenced(sub('k', 'wheel'), '+', sub('k', 'bar')), '×', power('t', '2')), '2'),
       ),

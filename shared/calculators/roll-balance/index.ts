@@ -9,7 +9,7 @@ import { rollBalance, type BalanceValues } from './balance.ts'
 import { rollAxisDrawing } from './drawing.ts'
 import { balanceInputs } from './inputs.ts'
 import { insidePlot } from './plot.ts'
-import { balanceAnswer } from './sentences.ts'
+import { balanceAnswer, goesBothWays } from './sentences.ts'
 import { balanceWorking } from './working.ts'
 
 const calculator = defineCalculator({
@@ -101,9 +101,12 @@ const calculator = defineCalculator({
     const share = (100 * other.front.moved) / (other.front.moved + other.rear.moved)
     // With the mass on the roll axis nothing leans, with one bar or the other.
     const lean = outputs.rollAngle === 0 ? 1 : other.rollAngle / outputs.rollAngle
+    const oneWay = !goesBothWays(outputs) && !goesBothWays({ loadTransferFront: other.front.moved, loadTransferRear: other.rear.moved })
     return {
       says: [
-        ...say`${figure(added, 'N/mm')} more front bar takes the front’s share from ${figure(outputs.frontShare, '%')} to ${figure(share, '%')}, and the car leans `,
+        ...(oneWay
+          ? say`${figure(added, 'N/mm')} more front bar takes the front’s share from ${figure(outputs.frontShare, '%')} to ${figure(share, '%')}, and the car leans `
+          : say`With ${figure(added, 'N/mm')} more front bar the car leans `),
         ...changeInWords(lean, 'more', 'less', 'just as much'),
         '.',
       ],

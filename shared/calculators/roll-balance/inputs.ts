@@ -17,7 +17,7 @@ const rollCentre = {
   max: 200,
   step: 1,
   reason: 'further from the ground the arms of no car put it',
-  help: 'Above the ground; below it counts minus. From suspension-geometry.',
+  help: 'Above the ground; below it counts minus. “What your arms do to the wheel” gives it.',
 } as const
 const wheelRate = {
   unit: 'N/mm',
@@ -25,7 +25,7 @@ const wheelRate = {
   max: 200,
   step: 0.01,
   reason: 'no wheel of a model car is sprung softer or harder',
-  help: 'At the wheel, not of the spring: wheel-rate works it out.',
+  help: 'At the wheel, not of the spring. “What your spring is worth at the wheel” gives it.',
 } as const
 const barRate = {
   unit: 'N/mm',
@@ -33,7 +33,7 @@ const barRate = {
   max: 200,
   step: 0.01,
   reason: 'less than no bar there is not, and more no car carries',
-  help: 'At the wheel: rate of one end from sway-bar, times the square of end travel over wheel travel. No bar is 0.',
+  help: 'At the wheel: the rate of one end (“How stiff a sway bar is”), times the square of end travel over wheel travel. No bar is 0.',
 } as const
 
 const balanceInputs = [

@@ -201,6 +201,7 @@ describe('roll-balance', () => {
       fc.property(car, (values) => {
         const { inputs, outputs } = answered(values)
         const { says } = calculator.answer(inputs as never, outputs as never)
+        fc.pre(plainSentence(says).startsWith('The inside'))
         const at = says.find((part) => typeof part !== 'string' && part.main && part.unit === 'g0')
         fc.pre(at !== undefined && typeof at !== 'string' && at.value >= 0.1)
         const there = outputsOf({ ...values, lateralAcceleration: typeof at === 'object' ? at.value : NaN })
@@ -209,6 +210,24 @@ describe('roll-balance', () => {
         ).toBeLessThan(1e-9 * values.mass * 10)
       }),
     )
+  })
+
+  it('goes over where the moments of both axles say, though one end may lift long before', () => {
+    // m a h about the outer tyres against m g t/2: with a stiff car (no lean to speak of) and equal tracks at a = g t/(2 h).
+    const stiff = { wheelRateFront: 40, wheelRateRear: 40, barRateFront: 3, cgHeight: 45, trackFront: 255, trackRear: 255 }
+    const over = 255 / (2 * 45)
+    const says = (lateralAcceleration: number) => answerOf({ ...stiff, lateralAcceleration })[0]
+    expect(says(over * 1.01)).toMatch(/the car rolls over, from about 2\.8\d\u00A0g on\.$/)
+    expect(says(over * 0.97)).not.toContain('rolls over')
+    expect(answerOf({ barRateFront: 3, lateralAcceleration: 2 }).join(' ')).toMatch(/^The inside front wheel lifts.*goes over from about 2\.8\d\u00A0g on/)
+    expect(answerOf({ barRateFront: 3, lateralAcceleration: 3.5 })[0]).toContain('rolls over')
+  })
+
+  it('prints no share where one end moves load the other way', () => {
+    const odd = { rollCentreFront: -150, rollCentreRear: 100, cgHeight: 10 }
+    const { inputs, outputs } = answered(odd)
+    expect(answerOf(odd).join(' ')).not.toMatch(/%/)
+    expect(plainSentence(calculator.comparison?.(inputs as never, outputs as never).says ?? [])).not.toMatch(/share/)
   })
 
   it('compares with a stiffer front bar', () => {

@@ -114,7 +114,7 @@ const calculator = defineCalculator({
     if (dischargeRate > 30) {
       warnings.push({
         field: 'averageCurrent',
-        message: say`${figure(dischargeRate, 'C')} on average empties a pack in about two minutes and heats it. Check the current; a peak is not an average.`,
+        message: say`${figure(dischargeRate, 'C')} on average empties a pack in about ${figure(60 / dischargeRate, 'min', 2)} and heats it. Check the current; a peak is not an average.`,
       })
     }
     return warnings

@@ -104,7 +104,7 @@ function travelTable(inputs: LinkageInputs): CalculatorTable {
     cells: poses.map((pose) => pose[key]),
   })
   return {
-    caption: 'Over the travel, camber and toe counted from ride height',
+    caption: 'Over the travel, angles from ride height',
     columns: ['Full droop', 'Half', 'Ride height', 'Half', 'Full bump'],
     rows: [
       row(say`Wheel`, 'mm', 3, 'travel'),

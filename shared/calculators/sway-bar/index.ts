@@ -132,7 +132,7 @@ const calculator = defineCalculator({
           ),
           '.',
         ],
-        say`At the wheel it is less: multiply by the square of how far the end moves for each millimetre of wheel.`,
+        say`For the rate at the wheel, multiply by the square of how far the end moves for each millimetre of wheel.`,
       ],
     }
   },

@@ -29,12 +29,6 @@ const derivation: Derivation = {
         sub('F', 'spring'),
         '×',
         shock,
-        '→',
-        sub('F', 'wheel'),
-        '=',
-        'r',
-        '×',
-        sub('F', 'spring'),
       ),
     },
     {
@@ -42,14 +36,8 @@ const derivation: Derivation = {
       formula: math(wheel, '=', frac(sub('F', 'wheel'), wheelTravel), '=', 'k', '×', power('r', '2')),
     },
     {
-      text: 'A mass on that rate, let go, swings so that its inertia and the spring balance at each moment.',
+      text: 'A mass on that rate, let go, swings so that its inertia and the spring balance at each moment: m (2 π f)² is the rate.',
       formula: math(
-        'm',
-        '×',
-        power(row('(', '2', '×', 'π', '×', 'f', ')'), '2'),
-        '=',
-        wheel,
-        '→',
         'f',
         '=',
         frac('1', row('2', '×', 'π')),

@@ -39,7 +39,7 @@ const calculator = defineCalculator({
       max: 50,
       step: 0.05,
       reason: 'no spring of a model car is softer or stiffer',
-      help: 'From the maker’s table, or worked out from the wire by spring-rate.',
+      help: 'From the maker’s table, or from the wire with “How stiff a spring is”.',
       carKey: { front: 'frontSpringRate', rear: 'rearSpringRate' },
     },
     {
@@ -76,7 +76,7 @@ const calculator = defineCalculator({
       max: 5000,
       step: 5,
       reason: 'less than none there is not, and more would hold the shock like a clamp',
-      help: 'From shock-pack, for your piston and oil.',
+      help: 'For your piston and oil: “What another shock piston does”.',
     },
   ],
   outputs: [

@@ -66,7 +66,11 @@ const calculator = defineCalculator({
       more: [
         say`The wheelbase is ${figure(newWheelbase, 'mm', 4)}.`,
         ...(rearLoadChange === 0 ? [] : [sense(rearLoadChange)]),
-        say`That is little weight. What you feel more is the longer or shorter wheelbase, and that toe, anti-squat and the drive shafts’ angles move along: check them afterwards.`,
+        ...(inputs.rearAxleBack === 0
+          ? []
+          : [
+              say`${Math.abs(rearLoadChange) < 1 ? 'That is little weight. What you feel more is' : 'You feel'} the longer or shorter wheelbase, and toe, anti-squat and the drive shafts’ angles move along: check them afterwards.`,
+            ]),
       ],
     }
   },

@@ -107,7 +107,7 @@ const calculator = defineCalculator({
       says: say`The two leads lose ${mainFigure(voltageDrop, 'V')} at ${figure(inputs.current, 'A')}.`,
       more: [
         say`They turn ${figure(heat, 'W')} into heat as long as that current flows.`,
-        say`Their resistance is ${figure(resistance, 'mΩ')}. Two good plugs add about as much, a worn one several times that: feel the plugs after a run before you change the wire.`,
+        say`Their resistance is ${figure(resistance, 'mΩ')}. Plugs and joints add to it, and a worn plug can add more than the wire: feel the plugs after a run before you change the wire.`,
       ],
     }
   },
@@ -144,7 +144,7 @@ const calculator = defineCalculator({
       known: 'From memory; not looked up. Public tables of copper wire agree.',
     },
     {
-      text: 'Two plugs add about as much as the leads; 50 to 80\u00A0°C after a hard run.',
+      text: 'A worn plug can add more than the leads; 50 to 80\u00A0°C after a hard run.',
       known: 'Common practice.',
     },
   ],

@@ -5,6 +5,8 @@ import type { PageContextServer } from 'vike/types'
 import { listEdits } from '#server/edits/list-edits.ts'
 import type { EditEntry } from '#server/edits/views.ts'
 import { listFreshInk } from '#server/guides/list-fresh-ink.ts'
+import { listLatestHeatReports } from '#server/heat-reports/list-heat-reports.ts'
+import { listRecentBursts } from '#server/heat-reports/list-recent-bursts.ts'
 import { forPage } from '#server/http/page-abort.ts'
 import type { EditState } from '#shared/vocabulary/edit-states.ts'
 
@@ -20,7 +22,7 @@ async function data(pageContext: PageContextServer) {
   const state = shelves[shelf] ?? 'in_review'
   const page = Math.min(100_000, Math.max(1, Number.parseInt(query.page ?? '1', 10) || 1))
   return forPage(pageContext, async () => {
-    const list = await listEdits(ctx, { whose: 'everyone', state, page })
+    const [list, reports, bursts] = await Promise.all([listEdits(ctx, { whose: 'everyone', state, page }), listLatestHeatReports(ctx), listRecentBursts(ctx)])
     const [last] = list.total === 0 ? await listFreshInk(ctx, { limit: 1 }) : []
     return {
       shelf,
@@ -29,6 +31,7 @@ async function data(pageContext: PageContextServer) {
       page: list.page,
       pages: list.pages,
       total: list.total,
+      heatReports: { total: reports.total, bursts: bursts.length },
       lastApproved: last === undefined ? null : { slug: last.slug, mark: last.mark, title: last.title, publishedAt: last.publishedAt },
     }
   })

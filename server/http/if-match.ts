@@ -2,7 +2,6 @@ export { sendVersion, versionFromIfMatch }
 
 import type { Request, Response } from 'express'
 import { PreconditionRequiredError } from '../errors.ts'
-import type { EditView } from './views.ts'
 
 /** Stands for a tag that matches nothing; real versions begin at 1. */
 const NO_VERSION = -1
@@ -22,7 +21,7 @@ function versionFromIfMatch(req: Request, current: number): number {
   return versions.find((version) => version === current) ?? versions[0] ?? NO_VERSION
 }
 
-/** Answers with an edit, and its version as the ETag. */
-function sendVersion(res: Response, edit: EditView): void {
-  res.setHeader('ETag', `"${edit.version}"`)
+/** Names the version that is answered with, as the ETag. */
+function sendVersion(res: Response, { version }: { version: number }): void {
+  res.setHeader('ETag', `"${version}"`)
 }

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Did it hold? · Camber & Clay'

@@ -1,0 +1,3 @@
+export { title }
+
+const title = 'Heat reports · Camber & Clay'
