@@ -30,14 +30,14 @@ describe.each(WIDTHS)('the main job at %i px', (width) => {
     const reader = await chromium.visit(server.url, { width })
     await reader.page.goto('/guides/shock-oil-and-pistons')
     await expectText(reader.page, 'h1', 'Shock oil')
-    const instrument = reader.page.locator('[data-island="calculator"]').first()
+    const instrument = reader.page.locator('[data-island="calculator"]', { has: reader.page.locator('#fluid-temperature') })
     await instrument.scrollIntoViewIfNeeded()
     const temperature = instrument.locator('input[type="text"][name$=".temperature"]')
     const before = await instrument.getByRole('status').first().innerText()
     await temperature.fill('3')
     await reader.page.waitForFunction(
       ([selector, old]) => (document.querySelector(selector!) as HTMLElement).innerText !== old,
-      ['[data-island="calculator"] [role="status"]', before] as const,
+      ['#fluid-temperature [role="status"]', before] as const,
     )
     expect(await instrument.getByRole('status').first().innerText()).toMatch(/3\s°C/)
 
